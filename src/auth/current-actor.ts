@@ -4,6 +4,7 @@ import { eq } from "drizzle-orm";
 import { cookies, headers } from "next/headers";
 import { cache } from "react";
 import type { Actor, Context } from "../data/access/actor";
+import { requireOwnOrigin } from "../data/edge/require-own-origin";
 import { database } from "../db/client";
 import { customerPeople, personRoles } from "../db/schema/people";
 import { lucia, sessionIdOf } from "./session";
@@ -16,6 +17,12 @@ export const currentContext = cache(async function currentContext(): Promise<Con
   const token = (await cookies()).get(lucia().sessionCookieName)?.value;
   return { actor: token ? await actorOf(token) : { kind: "anonymous" }, requestId };
 });
+
+/** For actions and handlers that change something: asked for by our own pages only. */
+export async function currentWriter(): Promise<Context> {
+  await requireOwnOrigin();
+  return currentContext();
+}
 
 async function actorOf(token: string): Promise<Actor> {
   const { session, user } = await lucia().validateSession(sessionIdOf(token));

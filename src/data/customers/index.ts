@@ -1,0 +1,5 @@
+import "server-only";
+
+export { addCustomer } from "./add-customer";
+export { editCustomer } from "./edit-customer";
+export { findCustomers } from "./find-customers";
