@@ -225,6 +225,7 @@ CREATE TABLE "cycle_revisions" (
 	"collects" text NOT NULL,
 	"repeatability" numeric(9, 5) NOT NULL,
 	"note" text DEFAULT '' NOT NULL,
+	"acknowledged" jsonb DEFAULT '[]'::jsonb NOT NULL,
 	"recorded_by" uuid NOT NULL,
 	"recorded_at" timestamp with time zone DEFAULT record_now() NOT NULL,
 	CONSTRAINT "cycle_revisions_reason" CHECK ("cycle_revisions"."revision" = 1 or char_length("cycle_revisions"."reason") > 0),

@@ -17,7 +17,9 @@ export const benches = pgTable(
     /** Standard uncertainty of one collected amount from repeatability alone: mL or g. */
     repeatability: measured("repeatability", 9, 5).notNull(),
     /** What a new cycle on this bench starts from. */
-    fluidId: uuid("fluid_id").notNull().references(() => fluids.id),
+    fluidId: uuid("fluid_id")
+      .notNull()
+      .references(() => fluids.id),
     driveVolts: measured("drive_volts", 5, 2).notNull(),
     driverKind: text("driver_kind", { enum: driverKinds }).notNull(),
     periodMs: measured("period_ms", 8, 3).notNull(),
@@ -39,7 +41,9 @@ export const benchChannels = pgTable(
   "bench_channels",
   {
     id: key("bench_channel_id"),
-    benchId: uuid("bench_id").notNull().references(() => benches.id),
+    benchId: uuid("bench_id")
+      .notNull()
+      .references(() => benches.id),
     number: smallint("number").notNull(),
   },
   (table) => [
@@ -53,9 +57,13 @@ export const benchInstruments = pgTable(
   "bench_instruments",
   {
     id: key("bench_instrument_id"),
-    benchId: uuid("bench_id").notNull().references(() => benches.id),
+    benchId: uuid("bench_id")
+      .notNull()
+      .references(() => benches.id),
     channelId: uuid("bench_channel_id").references(() => benchChannels.id),
-    instrumentId: uuid("instrument_id").notNull().references(() => instruments.id),
+    instrumentId: uuid("instrument_id")
+      .notNull()
+      .references(() => instruments.id),
     sinceAt: recordedAt("since_at"),
     untilAt: instant("until_at"),
   },
@@ -72,9 +80,13 @@ export const benchHolds = pgTable(
   "bench_holds",
   {
     id: key("bench_hold_id"),
-    benchId: uuid("bench_id").notNull().references(() => benches.id),
+    benchId: uuid("bench_id")
+      .notNull()
+      .references(() => benches.id),
     reason: text("reason").notNull(),
-    heldBy: uuid("held_by").notNull().references(() => people.id),
+    heldBy: uuid("held_by")
+      .notNull()
+      .references(() => people.id),
     heldAt: recordedAt("held_at"),
     clearedBy: uuid("cleared_by").references(() => people.id),
     clearedAt: instant("cleared_at"),

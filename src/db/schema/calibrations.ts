@@ -13,7 +13,9 @@ export const calibrations = pgTable(
   "calibrations",
   {
     id: key("calibration_id"),
-    instrumentId: uuid("instrument_id").notNull().references(() => instruments.id),
+    instrumentId: uuid("instrument_id")
+      .notNull()
+      .references(() => instruments.id),
     /** The number on the calibration's own sheet. */
     reference: text("reference").notNull(),
     validFrom: instant("valid_from").notNull(),
@@ -23,7 +25,9 @@ export const calibrations = pgTable(
     gainU: measured("gain_u", 12, 9).notNull(),
     offsetU: measured("offset_u", 14, 8).notNull(),
     note: text("note").notNull().default(""),
-    recordedBy: uuid("recorded_by").notNull().references(() => people.id),
+    recordedBy: uuid("recorded_by")
+      .notNull()
+      .references(() => people.id),
     recordedAt: recordedAt("recorded_at"),
     correctsId: uuid("corrects_id").references((): AnyPgColumn => calibrations.id),
     correctionReason: text("correction_reason"),

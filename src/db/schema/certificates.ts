@@ -1,6 +1,16 @@
 import "server-only";
 import { sql } from "drizzle-orm";
-import { type AnyPgColumn, check, index, jsonb, pgTable, smallint, text, uniqueIndex, uuid } from "drizzle-orm/pg-core";
+import {
+  type AnyPgColumn,
+  check,
+  index,
+  jsonb,
+  pgTable,
+  smallint,
+  text,
+  uniqueIndex,
+  uuid,
+} from "drizzle-orm/pg-core";
 import { instant, key, oneOf, recordedAt } from "../columns";
 import { certificateStates } from "../vocabulary";
 import { blobs } from "./blobs";
@@ -14,12 +24,20 @@ export const setReviews = pgTable(
   "set_reviews",
   {
     id: key("set_review_id"),
-    setId: uuid("set_id").notNull().references(() => sets.id),
+    setId: uuid("set_id")
+      .notNull()
+      .references(() => sets.id),
     decision: text("decision", { enum: ["sent back", "approved"] }).notNull(),
     reason: text("reason"),
-    asFoundRevisionId: uuid("as_found_revision_id").notNull().references(() => cycleRevisions.id),
-    asLeftRevisionId: uuid("as_left_revision_id").notNull().references(() => cycleRevisions.id),
-    reviewedBy: uuid("reviewed_by").notNull().references(() => people.id),
+    asFoundRevisionId: uuid("as_found_revision_id")
+      .notNull()
+      .references(() => cycleRevisions.id),
+    asLeftRevisionId: uuid("as_left_revision_id")
+      .notNull()
+      .references(() => cycleRevisions.id),
+    reviewedBy: uuid("reviewed_by")
+      .notNull()
+      .references(() => people.id),
     reviewedAt: recordedAt("reviewed_at"),
   },
   (table) => [
@@ -38,21 +56,31 @@ export const certificates = pgTable(
     number: text("number").notNull(),
     series: text("series").notNull(),
     revision: smallint("revision").notNull(),
-    setId: uuid("set_id").notNull().references(() => sets.id),
+    setId: uuid("set_id")
+      .notNull()
+      .references(() => sets.id),
     replacesId: uuid("replaces_id").references((): AnyPgColumn => certificates.id),
     replacementReason: text("replacement_reason"),
-    asFoundRevisionId: uuid("as_found_revision_id").notNull().references(() => cycleRevisions.id),
-    asLeftRevisionId: uuid("as_left_revision_id").notNull().references(() => cycleRevisions.id),
+    asFoundRevisionId: uuid("as_found_revision_id")
+      .notNull()
+      .references(() => cycleRevisions.id),
+    asLeftRevisionId: uuid("as_left_revision_id")
+      .notNull()
+      .references(() => cycleRevisions.id),
     toleranceClassRevisionId: uuid("tolerance_class_revision_id")
       .notNull()
       .references(() => toleranceClassRevisions.id),
     /** The whole of what the certificate says, as it was set on paper. */
     content: jsonb("content").notNull(),
     contentSha256: text("content_sha256").notNull(),
-    pdfSha256: text("pdf_sha256").notNull().references(() => blobs.sha256),
+    pdfSha256: text("pdf_sha256")
+      .notNull()
+      .references(() => blobs.sha256),
     verificationCode: text("verification_code").notNull(),
     programVersion: text("program_version").notNull(),
-    releasedBy: uuid("released_by").notNull().references(() => people.id),
+    releasedBy: uuid("released_by")
+      .notNull()
+      .references(() => people.id),
     issuedAt: recordedAt("issued_at"),
     state: text("state", { enum: certificateStates }).notNull().default("current"),
     stateAt: instant("state_at"),
@@ -68,6 +96,9 @@ export const certificates = pgTable(
     index("certificates_by_set").on(table.setId, table.issuedAt),
     index("certificates_by_issue").on(table.issuedAt, table.id),
     oneOf("certificates_state_known", table.state, certificateStates),
-    check("certificates_replacement_reason", sql`(${table.replacesId} is null) = (${table.replacementReason} is null)`),
+    check(
+      "certificates_replacement_reason",
+      sql`(${table.replacesId} is null) = (${table.replacementReason} is null)`,
+    ),
   ],
 );

@@ -1,6 +1,15 @@
 import "server-only";
 import { sql } from "drizzle-orm";
-import { type AnyPgColumn, boolean, check, index, pgTable, text, uniqueIndex, uuid } from "drizzle-orm/pg-core";
+import {
+  type AnyPgColumn,
+  boolean,
+  check,
+  index,
+  pgTable,
+  text,
+  uniqueIndex,
+  uuid,
+} from "drizzle-orm/pg-core";
 import { allOf, between, key, longest, measured, recordedAt } from "../columns";
 import { renewableParts } from "../vocabulary";
 import { people } from "./people";
@@ -10,7 +19,9 @@ export const cleaningRuns = pgTable(
   "cleaning_runs",
   {
     id: key("cleaning_run_id"),
-    setId: uuid("set_id").notNull().references(() => sets.id),
+    setId: uuid("set_id")
+      .notNull()
+      .references(() => sets.id),
     bath: text("bath").notNull(),
     detergentBatch: text("detergent_batch").notNull(),
     minutes: measured("minutes", 6, 1).notNull(),
@@ -20,7 +31,9 @@ export const cleaningRuns = pgTable(
     note: text("note").notNull().default(""),
     correctsId: uuid("corrects_id").references((): AnyPgColumn => cleaningRuns.id),
     correctionReason: text("correction_reason"),
-    recordedBy: uuid("recorded_by").notNull().references(() => people.id),
+    recordedBy: uuid("recorded_by")
+      .notNull()
+      .references(() => people.id),
     recordedAt: recordedAt("recorded_at"),
   },
   (table) => [

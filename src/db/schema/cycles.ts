@@ -1,6 +1,17 @@
 import "server-only";
 import { sql } from "drizzle-orm";
-import { check, index, integer, jsonb, pgTable, primaryKey, smallint, text, uniqueIndex, uuid } from "drizzle-orm/pg-core";
+import {
+  check,
+  index,
+  integer,
+  jsonb,
+  pgTable,
+  primaryKey,
+  smallint,
+  text,
+  uniqueIndex,
+  uuid,
+} from "drizzle-orm/pg-core";
 import { between, instant, key, longest, measured, oneOf, recordedAt, version } from "../columns";
 import { collections, driverKinds, phases } from "../vocabulary";
 import { benchChannels, benches } from "./benches";
@@ -17,7 +28,9 @@ export const cycles = pgTable(
   "cycles",
   {
     id: key("cycle_id"),
-    setId: uuid("set_id").notNull().references(() => sets.id),
+    setId: uuid("set_id")
+      .notNull()
+      .references(() => sets.id),
     phase: text("phase", { enum: phases }).notNull(),
     /** A phase may be measured again, after a second cleaning say: the highest number counts. */
     number: smallint("number").notNull(),
@@ -33,12 +46,18 @@ export const cycleRevisions = pgTable(
   "cycle_revisions",
   {
     id: key("cycle_revision_id"),
-    cycleId: uuid("cycle_id").notNull().references(() => cycles.id),
+    cycleId: uuid("cycle_id")
+      .notNull()
+      .references(() => cycles.id),
     revision: smallint("revision").notNull(),
     /** Null in the first, required in every correction. */
     reason: text("reason"),
-    benchId: uuid("bench_id").notNull().references(() => benches.id),
-    fluidId: uuid("fluid_id").notNull().references(() => fluids.id),
+    benchId: uuid("bench_id")
+      .notNull()
+      .references(() => benches.id),
+    fluidId: uuid("fluid_id")
+      .notNull()
+      .references(() => fluids.id),
     fluidTemperatureC: measured("fluid_temperature_c", 5, 2).notNull(),
     pressureKpa: measured("pressure_kpa", 7, 2).notNull(),
     driveVolts: measured("drive_volts", 5, 2).notNull(),
@@ -48,7 +67,11 @@ export const cycleRevisions = pgTable(
     /** Copied from the bench's record as it stood, since the budget rests on it. */
     repeatability: measured("repeatability", 9, 5).notNull(),
     note: text("note").notNull().default(""),
-    recordedBy: uuid("recorded_by").notNull().references(() => people.id),
+    /** Doubtful readings that were looked at and recorded as read: what was said of each. */
+    acknowledged: jsonb("acknowledged").$type<{ key: string; sentence: string }[]>().notNull().default([]),
+    recordedBy: uuid("recorded_by")
+      .notNull()
+      .references(() => people.id),
     recordedAt: recordedAt("recorded_at"),
   },
   (table) => [
@@ -69,13 +92,23 @@ export const cycleRevisions = pgTable(
 export const cycleInjectors = pgTable(
   "cycle_injectors",
   {
-    revisionId: uuid("cycle_revision_id").notNull().references(() => cycleRevisions.id),
-    setInjectorId: uuid("set_injector_id").notNull().references(() => setInjectors.id),
-    channelId: uuid("bench_channel_id").notNull().references(() => benchChannels.id),
+    revisionId: uuid("cycle_revision_id")
+      .notNull()
+      .references(() => cycleRevisions.id),
+    setInjectorId: uuid("set_injector_id")
+      .notNull()
+      .references(() => setInjectors.id),
+    channelId: uuid("bench_channel_id")
+      .notNull()
+      .references(() => benchChannels.id),
     /** A set larger than the bench is measured in several loads. */
     load: smallint("load").notNull(),
-    instrumentId: uuid("instrument_id").notNull().references(() => instruments.id),
-    calibrationId: uuid("calibration_id").notNull().references(() => calibrations.id),
+    instrumentId: uuid("instrument_id")
+      .notNull()
+      .references(() => instruments.id),
+    calibrationId: uuid("calibration_id")
+      .notNull()
+      .references(() => calibrations.id),
   },
   (table) => [
     primaryKey({ columns: [table.revisionId, table.setInjectorId] }),
@@ -90,9 +123,15 @@ export const cycleInjectors = pgTable(
 export const cycleInstruments = pgTable(
   "cycle_instruments",
   {
-    revisionId: uuid("cycle_revision_id").notNull().references(() => cycleRevisions.id),
-    instrumentId: uuid("instrument_id").notNull().references(() => instruments.id),
-    calibrationId: uuid("calibration_id").notNull().references(() => calibrations.id),
+    revisionId: uuid("cycle_revision_id")
+      .notNull()
+      .references(() => cycleRevisions.id),
+    instrumentId: uuid("instrument_id")
+      .notNull()
+      .references(() => instruments.id),
+    calibrationId: uuid("calibration_id")
+      .notNull()
+      .references(() => calibrations.id),
   },
   (table) => [
     primaryKey({ columns: [table.revisionId, table.instrumentId] }),
@@ -105,15 +144,21 @@ export const cycleDrafts = pgTable(
   "cycle_drafts",
   {
     id: key("cycle_draft_id"),
-    setId: uuid("set_id").notNull().references(() => sets.id),
+    setId: uuid("set_id")
+      .notNull()
+      .references(() => sets.id),
     phase: text("phase", { enum: phases }).notNull(),
     /** The cycle that this draft corrects. */
     correctsCycleId: uuid("corrects_cycle_id").references(() => cycles.id),
     fields: jsonb("fields").$type<Record<string, string>>().notNull().default({}),
     version: version(),
-    openedBy: uuid("opened_by").notNull().references(() => people.id),
+    openedBy: uuid("opened_by")
+      .notNull()
+      .references(() => people.id),
     openedAt: recordedAt("opened_at"),
-    savedBy: uuid("saved_by").notNull().references(() => people.id),
+    savedBy: uuid("saved_by")
+      .notNull()
+      .references(() => people.id),
     savedAt: recordedAt("saved_at"),
     /** Closed by recording or by being put away with a reason. */
     closedAt: instant("closed_at"),
@@ -131,12 +176,21 @@ export const readingFiles = pgTable(
   "reading_files",
   {
     id: key("reading_file_id"),
-    draftId: uuid("cycle_draft_id").notNull().references(() => cycleDrafts.id),
-    sha256: text("sha256").notNull().references(() => blobs.sha256),
+    draftId: uuid("cycle_draft_id")
+      .notNull()
+      .references(() => cycleDrafts.id),
+    sha256: text("sha256")
+      .notNull()
+      .references(() => blobs.sha256),
     name: text("name").notNull(),
     rows: integer("rows").notNull(),
-    sentBy: uuid("sent_by").notNull().references(() => people.id),
+    sentBy: uuid("sent_by")
+      .notNull()
+      .references(() => people.id),
     sentAt: recordedAt("sent_at"),
   },
-  (table) => [index("reading_files_by_draft").on(table.draftId), longest("reading_files_name_length", table.name, 200)],
+  (table) => [
+    index("reading_files_by_draft").on(table.draftId),
+    longest("reading_files_name_length", table.name, 200),
+  ],
 );

@@ -1,6 +1,15 @@
 import "server-only";
 import { sql } from "drizzle-orm";
-import { type AnyPgColumn, boolean, index, pgTable, smallint, text, uniqueIndex, uuid } from "drizzle-orm/pg-core";
+import {
+  type AnyPgColumn,
+  boolean,
+  index,
+  pgTable,
+  smallint,
+  text,
+  uniqueIndex,
+  uuid,
+} from "drizzle-orm/pg-core";
 import { between, key, longest, oneOf, recordedAt } from "../columns";
 import { injectorConditions, injectorStates } from "../vocabulary";
 import { injectorModels } from "./models";
@@ -12,7 +21,9 @@ export const injectors = pgTable(
   "injectors",
   {
     id: key("injector_id"),
-    injectorModelId: uuid("injector_model_id").notNull().references(() => injectorModels.id),
+    injectorModelId: uuid("injector_model_id")
+      .notNull()
+      .references(() => injectorModels.id),
     serial: text("serial"),
     createdAt: recordedAt("created_at"),
   },
@@ -27,8 +38,12 @@ export const setInjectors = pgTable(
   "set_injectors",
   {
     id: key("set_injector_id"),
-    setId: uuid("set_id").notNull().references(() => sets.id),
-    injectorId: uuid("injector_id").notNull().references(() => injectors.id),
+    setId: uuid("set_id")
+      .notNull()
+      .references(() => sets.id),
+    injectorId: uuid("injector_id")
+      .notNull()
+      .references(() => injectors.id),
     position: smallint("position").notNull(),
     /** 26-0147/3; a replacement in the same place carries a letter: 26-0147/3B. */
     tag: text("tag").notNull(),
@@ -42,7 +57,9 @@ export const setInjectors = pgTable(
   },
   (table) => [
     uniqueIndex("set_injectors_one_per_tag").on(table.tag),
-    uniqueIndex("set_injectors_one_per_position").on(table.setId, table.position).where(sql`${table.state} = 'in set'`),
+    uniqueIndex("set_injectors_one_per_position")
+      .on(table.setId, table.position)
+      .where(sql`${table.state} = 'in set'`),
     uniqueIndex("set_injectors_one_open_set").on(table.injectorId).where(sql`${table.inHouse}`),
     uniqueIndex("set_injectors_one_replacement").on(table.replacesId),
     index("set_injectors_by_injector").on(table.injectorId),
@@ -55,8 +72,12 @@ export const setInjectors = pgTable(
 );
 
 export const injectorRejections = pgTable("injector_rejections", {
-  setInjectorId: uuid("set_injector_id").primaryKey().references(() => setInjectors.id),
+  setInjectorId: uuid("set_injector_id")
+    .primaryKey()
+    .references(() => setInjectors.id),
   reason: text("reason").notNull(),
-  rejectedBy: uuid("rejected_by").notNull().references(() => people.id),
+  rejectedBy: uuid("rejected_by")
+    .notNull()
+    .references(() => people.id),
   rejectedAt: recordedAt("rejected_at"),
 });

@@ -4,7 +4,10 @@ import { boolean, check, integer, jsonb, pgTable, text } from "drizzle-orm/pg-co
 import { between, longest, measured, oneOf, version } from "../columns";
 import { paperSizes } from "../vocabulary";
 
-export type TestPlan = { widths: { pulseWidthMs: number; pulseCount: number }[]; heldOpenSeconds: number | null };
+export type TestPlan = {
+  widths: { pulseWidthMs: number; pulseCount: number }[];
+  heldOpenSeconds: number | null;
+};
 
 /** The one row of what the lab says of itself. */
 export const labDetails = pgTable(

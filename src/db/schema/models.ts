@@ -26,7 +26,10 @@ export const injectorModels = pgTable(
     createdAt: recordedAt("created_at"),
   },
   (table) => [
-    uniqueIndex("injector_models_one_per_part_number").on(sql`lower(${table.make})`, sql`lower(${table.partNumber})`),
+    uniqueIndex("injector_models_one_per_part_number").on(
+      sql`lower(${table.make})`,
+      sql`lower(${table.partNumber})`,
+    ),
     index("injector_models_by_name_parts").using(
       "gin",
       sql`lower(${table.make} || ' ' || ${table.partNumber}) gin_trgm_ops`,

@@ -28,18 +28,27 @@ export const people = pgTable(
 export const personRoles = pgTable(
   "person_roles",
   {
-    personId: uuid("person_id").notNull().references(() => people.id),
+    personId: uuid("person_id")
+      .notNull()
+      .references(() => people.id),
     role: text("role", { enum: staffRoles }).notNull(),
   },
-  (table) => [primaryKey({ columns: [table.personId, table.role] }), oneOf("person_roles_known", table.role, staffRoles)],
+  (table) => [
+    primaryKey({ columns: [table.personId, table.role] }),
+    oneOf("person_roles_known", table.role, staffRoles),
+  ],
 );
 
 /** Which people act for which customers; one customer has several, one person may have several. */
 export const customerPeople = pgTable(
   "customer_people",
   {
-    customerId: uuid("customer_id").notNull().references(() => customers.id),
-    personId: uuid("person_id").notNull().references(() => people.id),
+    customerId: uuid("customer_id")
+      .notNull()
+      .references(() => customers.id),
+    personId: uuid("person_id")
+      .notNull()
+      .references(() => people.id),
   },
   (table) => [
     primaryKey({ columns: [table.customerId, table.personId] }),
@@ -52,7 +61,9 @@ export const sessions = pgTable(
   {
     /** SHA-256 of the cookie's token; the token itself is never stored. */
     id: text("session_id").primaryKey(),
-    userId: uuid("person_id").notNull().references(() => people.id),
+    userId: uuid("person_id")
+      .notNull()
+      .references(() => people.id),
     /** End of the idle time. The absolute limit counts from created_at. */
     expiresAt: instant("expires_at").notNull(),
     createdAt: recordedAt("created_at"),
@@ -68,7 +79,9 @@ export const entryLinks = pgTable(
   "entry_links",
   {
     tokenHash: text("token_hash").primaryKey(),
-    personId: uuid("person_id").notNull().references(() => people.id),
+    personId: uuid("person_id")
+      .notNull()
+      .references(() => people.id),
     expiresAt: instant("expires_at").notNull(),
     usedAt: instant("used_at"),
     createdAt: recordedAt("created_at"),

@@ -11,12 +11,18 @@ export const photos = pgTable(
   "photos",
   {
     id: key("photo_id"),
-    setId: uuid("set_id").notNull().references(() => sets.id),
+    setId: uuid("set_id")
+      .notNull()
+      .references(() => sets.id),
     setInjectorId: uuid("set_injector_id").references(() => setInjectors.id),
     kind: text("kind", { enum: photoKinds }).notNull(),
     phase: text("phase", { enum: phases }),
-    sha256: text("sha256").notNull().references(() => blobs.sha256),
-    thumbnailSha256: text("thumbnail_sha256").notNull().references(() => blobs.sha256),
+    sha256: text("sha256")
+      .notNull()
+      .references(() => blobs.sha256),
+    thumbnailSha256: text("thumbnail_sha256")
+      .notNull()
+      .references(() => blobs.sha256),
     widthPx: integer("width_px").notNull(),
     heightPx: integer("height_px").notNull(),
     /** What came in, before it was turned upright, stripped and re-encoded. */
@@ -24,7 +30,9 @@ export const photos = pgTable(
     receivedBytes: integer("received_bytes").notNull(),
     receivedName: text("received_name").notNull(),
     claimedTakenAt: text("claimed_taken_at"),
-    takenBy: uuid("taken_by").notNull().references(() => people.id),
+    takenBy: uuid("taken_by")
+      .notNull()
+      .references(() => people.id),
     takenAt: recordedAt("taken_at"),
     hiddenBy: uuid("hidden_by").references(() => people.id),
     hiddenAt: instant("hidden_at"),

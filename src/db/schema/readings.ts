@@ -1,6 +1,17 @@
 import "server-only";
 import { sql } from "drizzle-orm";
-import { bigint, check, index, integer, pgTable, primaryKey, smallint, text, uniqueIndex, uuid } from "drizzle-orm/pg-core";
+import {
+  bigint,
+  check,
+  index,
+  integer,
+  pgTable,
+  primaryKey,
+  smallint,
+  text,
+  uniqueIndex,
+  uuid,
+} from "drizzle-orm/pg-core";
 import { between, longest, measured, oneOf } from "../columns";
 import { sprayGrades } from "../vocabulary";
 import { cycleRevisions } from "./cycles";
@@ -11,8 +22,12 @@ export const readings = pgTable(
   "readings",
   {
     id: bigint("reading_id", { mode: "number" }).primaryKey().generatedAlwaysAsIdentity(),
-    revisionId: uuid("cycle_revision_id").notNull().references(() => cycleRevisions.id),
-    setInjectorId: uuid("set_injector_id").notNull().references(() => setInjectors.id),
+    revisionId: uuid("cycle_revision_id")
+      .notNull()
+      .references(() => cycleRevisions.id),
+    setInjectorId: uuid("set_injector_id")
+      .notNull()
+      .references(() => setInjectors.id),
     /** Null when the injector was held open. */
     pulseWidthMs: measured("pulse_width_ms", 8, 4),
     pulseCount: integer("pulse_count"),
@@ -22,8 +37,12 @@ export const readings = pgTable(
     amount: measured("amount", 10, 4).notNull(),
   },
   (table) => [
-    uniqueIndex("readings_once")
-      .on(table.revisionId, table.setInjectorId, sql`coalesce(${table.pulseWidthMs}, 0)`, table.repeat),
+    uniqueIndex("readings_once").on(
+      table.revisionId,
+      table.setInjectorId,
+      sql`coalesce(${table.pulseWidthMs}, 0)`,
+      table.repeat,
+    ),
     index("readings_by_injector").on(table.setInjectorId),
     check(
       "readings_pulsed_or_held_open",
@@ -41,8 +60,12 @@ export const readings = pgTable(
 export const injectorChecks = pgTable(
   "injector_checks",
   {
-    revisionId: uuid("cycle_revision_id").notNull().references(() => cycleRevisions.id),
-    setInjectorId: uuid("set_injector_id").notNull().references(() => setInjectors.id),
+    revisionId: uuid("cycle_revision_id")
+      .notNull()
+      .references(() => cycleRevisions.id),
+    setInjectorId: uuid("set_injector_id")
+      .notNull()
+      .references(() => setInjectors.id),
     windingOhm: measured("winding_ohm", 8, 3),
     leadOhm: measured("lead_ohm", 6, 3),
     windingTemperatureC: measured("winding_temperature_c", 5, 2),

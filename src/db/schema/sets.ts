@@ -14,9 +14,15 @@ export const sets = pgTable(
     id: key("set_id"),
     /** As it is spoken and written on bags: 26-0147. */
     number: text("number").notNull(),
-    customerId: uuid("customer_id").notNull().references(() => customers.id),
-    injectorModelId: uuid("injector_model_id").notNull().references(() => injectorModels.id),
-    toleranceClassId: uuid("tolerance_class_id").notNull().references(() => toleranceClasses.id),
+    customerId: uuid("customer_id")
+      .notNull()
+      .references(() => customers.id),
+    injectorModelId: uuid("injector_model_id")
+      .notNull()
+      .references(() => injectorModels.id),
+    toleranceClassId: uuid("tolerance_class_id")
+      .notNull()
+      .references(() => toleranceClasses.id),
     workAsked: text("work_asked", { enum: workItems }).array().notNull(),
     /** In the customer's words; printed on the certificate as theirs. */
     customerRequest: text("customer_request").notNull().default(""),
@@ -24,7 +30,9 @@ export const sets = pgTable(
     promisedOn: date("promised_on", { mode: "string" }).notNull(),
     stage: text("stage", { enum: stages }).notNull().default("checked in"),
     version: version(),
-    checkedInBy: uuid("checked_in_by").notNull().references(() => people.id),
+    checkedInBy: uuid("checked_in_by")
+      .notNull()
+      .references(() => people.id),
     checkedInAt: recordedAt("checked_in_at"),
   },
   (table) => [
@@ -46,11 +54,15 @@ export const setSteps = pgTable(
   "set_steps",
   {
     id: key("set_step_id"),
-    setId: uuid("set_id").notNull().references(() => sets.id),
+    setId: uuid("set_id")
+      .notNull()
+      .references(() => sets.id),
     fromStage: text("from_stage", { enum: stages }),
     toStage: text("to_stage", { enum: stages }).notNull(),
     reason: text("reason"),
-    personId: uuid("person_id").notNull().references(() => people.id),
+    personId: uuid("person_id")
+      .notNull()
+      .references(() => people.id),
     at: recordedAt("at"),
   },
   (table) => [index("set_steps_by_set").on(table.setId, table.at)],
@@ -59,7 +71,10 @@ export const setSteps = pgTable(
 /** Which stage may follow which; the stage trigger reads it. */
 export const stageMoves = pgTable(
   "stage_moves",
-  { fromStage: text("from_stage", { enum: stages }).notNull(), toStage: text("to_stage", { enum: stages }).notNull() },
+  {
+    fromStage: text("from_stage", { enum: stages }).notNull(),
+    toStage: text("to_stage", { enum: stages }).notNull(),
+  },
   (table) => [uniqueIndex("stage_moves_once").on(table.fromStage, table.toStage)],
 );
 
@@ -67,9 +82,13 @@ export const setHolds = pgTable(
   "set_holds",
   {
     id: key("set_hold_id"),
-    setId: uuid("set_id").notNull().references(() => sets.id),
+    setId: uuid("set_id")
+      .notNull()
+      .references(() => sets.id),
     reason: text("reason").notNull(),
-    heldBy: uuid("held_by").notNull().references(() => people.id),
+    heldBy: uuid("held_by")
+      .notNull()
+      .references(() => people.id),
     heldAt: recordedAt("held_at"),
     clearedBy: uuid("cleared_by").references(() => people.id),
     clearedAt: instant("cleared_at"),
@@ -84,11 +103,15 @@ export const setHolds = pgTable(
 export const handOvers = pgTable(
   "hand_overs",
   {
-    setId: uuid("set_id").primaryKey().references(() => sets.id),
+    setId: uuid("set_id")
+      .primaryKey()
+      .references(() => sets.id),
     takenBy: text("taken_by").notNull(),
     way: text("way", { enum: handOverWays }).notNull(),
     consignment: text("consignment").notNull().default(""),
-    handedOverBy: uuid("handed_over_by").notNull().references(() => people.id),
+    handedOverBy: uuid("handed_over_by")
+      .notNull()
+      .references(() => people.id),
     at: recordedAt("at"),
   },
   (table) => [

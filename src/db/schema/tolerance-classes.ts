@@ -24,7 +24,9 @@ export const toleranceClassRevisions = pgTable(
   "tolerance_class_revisions",
   {
     id: key("tolerance_class_revision_id"),
-    toleranceClassId: uuid("tolerance_class_id").notNull().references(() => toleranceClasses.id),
+    toleranceClassId: uuid("tolerance_class_id")
+      .notNull()
+      .references(() => toleranceClasses.id),
     revision: integer("revision").notNull(),
     /** Spread is 100·(max − min)/mean. A limit that is null is not judged. */
     staticSpreadPercent: measured("static_spread_percent", 6, 3),
@@ -32,7 +34,9 @@ export const toleranceClassRevisions = pgTable(
     resistanceRangeOhm: measured("resistance_range_ohm", 7, 3),
     /** Tighter than the model's own limit where the class asks for it. */
     leakageLimitMm3PerMin: measured("leakage_limit_mm3_per_min", 8, 2),
-    recordedBy: uuid("recorded_by").notNull().references(() => people.id),
+    recordedBy: uuid("recorded_by")
+      .notNull()
+      .references(() => people.id),
     recordedAt: recordedAt("recorded_at"),
   },
   (table) => [
@@ -48,7 +52,9 @@ export const toleranceClassRevisions = pgTable(
 export const toleranceClassLimits = pgTable(
   "tolerance_class_limits",
   {
-    revisionId: uuid("tolerance_class_revision_id").notNull().references(() => toleranceClassRevisions.id),
+    revisionId: uuid("tolerance_class_revision_id")
+      .notNull()
+      .references(() => toleranceClassRevisions.id),
     fromPulseWidthMs: measured("from_pulse_width_ms", 8, 4).notNull(),
     spreadPercent: measured("spread_percent", 6, 3).notNull(),
   },
