@@ -174,6 +174,7 @@ export const verbs = {
   listBenchQueue: { row: 10 },
   openCycleDraft: { row: 10, writes: true },
   getCycleDraft: { row: 10 },
+  getCycleDraftChanges: { row: 10 },
   saveCycleDraft: { row: 10, writes: true },
   putAwayCycleDraft: { row: 10, writes: true },
   recordCycle: { row: 10, writes: true },

@@ -1,0 +1,39 @@
+import type { InstrumentKind } from "../../../db/vocabulary";
+import type { BenchInstrument, CycleBench, Sheet } from "./types";
+
+/** An instrument that a cycle rests on and that is out of calibration, or a place that has none. */
+export type MissingCalibration = { place: string; code: string | null; lapsedAt: string | null };
+
+const always: InstrumentKind[] = ["pressure gauge", "thermometer", "pulse timer"];
+
+/** What is out of calibration for this sheet: the channels it uses and the bench's own instruments. */
+export function missingCalibrations(bench: CycleBench, sheet: Sheet): MissingCalibration[] {
+  const used = new Set(sheet.rows.map((row) => row.channelNumber));
+  const channels = bench.channels.filter((channel) => used.has(channel.number));
+  const windings = sheet.rows.some((row) => row.checks.windingOhm !== null);
+  return [
+    ...channels.flatMap(({ number, instrument }) => lacking(`channel ${number}`, instrument)),
+    ...kindsUsed(bench, windings).flatMap((kind) => lacking(kind, instrumentOf(bench, kind))),
+  ];
+}
+
+/** The bench's instruments that this sheet rests on. */
+export function instrumentsUsed(bench: CycleBench, sheet: Sheet): BenchInstrument[] {
+  const windings = sheet.rows.some((row) => row.checks.windingOhm !== null);
+  return kindsUsed(bench, windings).flatMap((kind) => instrumentOf(bench, kind) ?? []);
+}
+
+/** A drive supply counts where the bench has one of its own; an ohmmeter when windings were measured. */
+function kindsUsed(bench: CycleBench, windings: boolean): InstrumentKind[] {
+  const supply: InstrumentKind[] = instrumentOf(bench, "drive supply") ? ["drive supply"] : [];
+  return [...always, ...supply, ...(windings ? (["ohmmeter"] as const) : [])];
+}
+
+export function instrumentOf(bench: CycleBench, kind: InstrumentKind): BenchInstrument | null {
+  return bench.instruments.find((instrument) => instrument.kind === kind) ?? null;
+}
+
+function lacking(place: string, instrument: BenchInstrument | null): MissingCalibration[] {
+  if (instrument?.calibration) return [];
+  return [{ place, code: instrument?.code ?? null, lapsedAt: instrument?.lapsedAt ?? null }];
+}
