@@ -77,7 +77,8 @@ BEGIN
   IF NEW.stage = 'cleaning' AND NOT EXISTS (SELECT FROM cleaning_runs WHERE set_id = NEW.set_id) THEN
     PERFORM refuse('sets_stage_needs_cleaning_run', 'No cleaning run is recorded.');
   END IF;
-  IF NEW.stage = 'certified'
+  -- A certificate may be revoked after release; the set is then not handed over as certified.
+  IF (NEW.stage = 'certified' OR OLD.stage = 'certified')
      AND NOT EXISTS (SELECT FROM certificates WHERE set_id = NEW.set_id AND state = 'current') THEN
     PERFORM refuse('sets_stage_needs_certificate', 'No certificate is current.');
   END IF;
