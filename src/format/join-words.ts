@@ -1,0 +1,5 @@
+/** `a`, `a and b`, `a, b and c`. */
+export function joinWords(words: readonly string[], last = "and"): string {
+  if (words.length < 2) return words.join("");
+  return `${words.slice(0, -1).join(", ")} ${last} ${words.at(-1)}`;
+}
