@@ -1,4 +1,4 @@
-import { z } from "zod";
+import type { z } from "zod";
 import { driverKinds, sprayGrades } from "../../db/vocabulary";
 import { choice, decimal, id, optionalDecimal, optionalText } from "../fields";
 
@@ -126,10 +126,7 @@ const rules: [RegExp, z.ZodType][] = [
   ...sharedCheckKeys.map((key) => rule("checks\\.")([key, checkSchemas[key]])),
   ...Object.entries(columnSchemas).map(rule(`column\\.${column}\\.`)),
   ...Object.entries(checkSchemas).map(rule(`check\\.${uuid}\\.`)),
-  [
-    new RegExp(`^channel\\.${uuid}$`),
-    decimal({ label: "Channel", low: 1, high: 24, decimals: 0 }),
-  ],
+  [new RegExp(`^channel\\.${uuid}$`), decimal({ label: "Channel", low: 1, high: 24, decimals: 0 })],
   [new RegExp(`^load\\.${uuid}$`), decimal({ label: "Load", low: 1, high: 48, decimals: 0 })],
   [new RegExp(`^reading\\.${uuid}\\.${column}\\.(?:[1-9]|1\\d|20)$`), amountSchema],
   [
@@ -161,7 +158,7 @@ export function problemOf(field: string, text: string | undefined): string | nul
 }
 
 /** The value of a text that is right; null for one that is wrong or not there. */
-export function valueOf<Value>(fields: DraftFields, field: string): Value | null {
+export function typedValue<Value>(fields: DraftFields, field: string): Value | null {
   const text = fields[field];
   if (text === undefined || text.trim() === "") return null;
   const parsed = schemaOf(field)?.safeParse(text);

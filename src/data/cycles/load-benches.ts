@@ -108,7 +108,9 @@ async function selectInstruments(connection: Connection, moment: SQL) {
 
 type InstrumentRow = {
   instrument: typeof instruments.$inferSelect;
-  calibration: (Omit<NonNullable<BenchInstrument["calibration"]>, "validUntil"> & { validUntil: Date }) | null;
+  calibration:
+    | (Omit<NonNullable<BenchInstrument["calibration"]>, "validUntil"> & { validUntil: Date })
+    | null;
   lapsedAt: Date | null;
 };
 

@@ -5,7 +5,11 @@ import { customers } from "../../db/schema/customers";
 import { labDetails } from "../../db/schema/lab";
 import { injectorModels } from "../../db/schema/models";
 import { sets } from "../../db/schema/sets";
-import { toleranceClasses, toleranceClassLimits, toleranceClassRevisions } from "../../db/schema/tolerance-classes";
+import {
+  toleranceClasses,
+  toleranceClassLimits,
+  toleranceClassRevisions,
+} from "../../db/schema/tolerance-classes";
 import type { JudgedClass } from "./results";
 
 export type SetBasis = Awaited<ReturnType<typeof selectBasis>>[number] & { toleranceClass: JudgedClass };

@@ -15,38 +15,44 @@ import { type DraftChange, mergeChanges } from "./sheet/merge-changes";
  * nothing of the request is saved. `fields` comes back whole when others had changed the draft since `version`.
  */
 export function saveCycleDraft(context: Context, raw: unknown) {
-  return write(context, "saveCycleDraft", saveCycleDraftInput, raw, async ({ transaction, input, record }) => {
-    const draft = await lockOpenDraft(transaction, input.draftId);
-    const { fields, changed, conflicts } = mergeChanges(draft.fields, input.changes);
-    if (conflicts.length > 0)
-      throw conflict(
-        "Somebody else typed here meanwhile.",
-        conflicts.map((each) => ({ ...each, label: each.field })),
-      );
-    const [saved] = await transaction
-      .update(cycleDrafts)
-      .set({
-        fields,
-        version: draft.version + 1,
-        savedBy: requirePerson(context).personId,
-        savedAt: recordNow,
-      })
-      .where(eq(cycleDrafts.id, draft.id))
-      .returning({ version: cycleDrafts.version, savedAt: cycleDrafts.savedAt });
-    await record({
-      event: "draft saved",
-      noun: "draft",
-      objectId: draft.id,
-      setId: draft.setId,
-      before: textsOf(changed, "base"),
-      after: textsOf(changed, "value"),
-    });
-    return {
-      version: saved!.version,
-      savedAt: saved!.savedAt.toISOString(),
-      fields: draft.version === input.version ? null : fields,
-    };
-  });
+  return write(
+    context,
+    "saveCycleDraft",
+    saveCycleDraftInput,
+    raw,
+    async ({ transaction, input, record }) => {
+      const draft = await lockOpenDraft(transaction, input.draftId);
+      const { fields, changed, conflicts } = mergeChanges(draft.fields, input.changes);
+      if (conflicts.length > 0)
+        throw conflict(
+          "Somebody else typed here meanwhile.",
+          conflicts.map((each) => ({ ...each, label: each.field })),
+        );
+      const [saved] = await transaction
+        .update(cycleDrafts)
+        .set({
+          fields,
+          version: draft.version + 1,
+          savedBy: requirePerson(context).personId,
+          savedAt: recordNow,
+        })
+        .where(eq(cycleDrafts.id, draft.id))
+        .returning({ version: cycleDrafts.version, savedAt: cycleDrafts.savedAt });
+      await record({
+        event: "draft saved",
+        noun: "draft",
+        objectId: draft.id,
+        setId: draft.setId,
+        before: textsOf(changed, "base"),
+        after: textsOf(changed, "value"),
+      });
+      return {
+        version: saved!.version,
+        savedAt: saved!.savedAt.toISOString(),
+        fields: draft.version === input.version ? null : fields,
+      };
+    },
+  );
 }
 
 function textsOf(changes: DraftChange[], which: "base" | "value"): Record<string, string> {

@@ -1,4 +1,11 @@
-import { checkKeys, type DraftFields, draftField, heldOpenColumn, widthColumnId } from "../draft-fields";
+import {
+  checkKeys,
+  type DraftFields,
+  draftField,
+  heldOpenColumn,
+  sharedCheckKeys,
+  widthColumnId,
+} from "../draft-fields";
 import type { CycleRevision } from "../results";
 import type { CycleBench, SheetInjector } from "./types";
 
@@ -50,7 +57,10 @@ export function placesOnBench(injectors: SheetInjector[], bench: CycleBench): Dr
 }
 
 /** Bench, drive, columns and channels as in an earlier cycle, for injectors that are still there. */
-export function planOfRevision(revision: CycleRevision, injectors: SheetInjector[]): DraftFields {
+export function planOfRevision(
+  revision: CycleRevision,
+  injectors: Pick<SheetInjector, "setInjectorId">[],
+): DraftFields {
   const present = new Set(injectors.map((injector) => injector.setInjectorId));
   const kept = revision.injectors.filter((injector) => present.has(injector.setInjectorId));
   return {
@@ -60,15 +70,17 @@ export function planOfRevision(revision: CycleRevision, injectors: SheetInjector
     [draftField.condition("driverKind")]: revision.driverKind,
     [draftField.condition("periodMs")]: String(revision.periodMs.indicated),
     ...columnsOfRevision(revision).fields,
-    ...Object.fromEntries(kept.map((row) => [draftField.channel(row.setInjectorId), String(row.channelNumber)])),
+    ...Object.fromEntries(
+      kept.map((row) => [draftField.channel(row.setInjectorId), String(row.channelNumber)]),
+    ),
     ...Object.fromEntries(kept.map((row) => [draftField.load(row.setInjectorId), String(row.load)])),
   };
 }
 
 /** The whole sheet as it was recorded, to be corrected. */
-export function fieldsOfRevision(revision: CycleRevision, injectors: SheetInjector[]): DraftFields {
+export function fieldsOfRevision(revision: CycleRevision): DraftFields {
   const { columnOf } = columnsOfRevision(revision);
-  const fields = planOfRevision(revision, injectors);
+  const fields = { ...planOfRevision(revision, revision.injectors), ...sharedChecks(revision) };
   fields[draftField.condition("fluidTemperatureC")] = String(revision.fluidTemperatureC.indicated);
   fields[draftField.condition("pressureKpa")] = String(revision.pressureKpa.indicated);
   fields.note = revision.note;
@@ -76,9 +88,20 @@ export function fieldsOfRevision(revision: CycleRevision, injectors: SheetInject
     for (const { pulseWidthMs, repeat, amount } of readings)
       fields[draftField.reading(setInjectorId, columnOf(pulseWidthMs), repeat)] = String(amount);
     for (const key of checkKeys)
-      if (checks[key] !== null) fields[draftField.check(setInjectorId, key)] = String(checks[key]);
+      if (checks[key] !== null && fields[`checks.${key}`] !== String(checks[key]))
+        fields[draftField.check(setInjectorId, key)] = String(checks[key]);
   }
   return withoutEmpty(fields);
+}
+
+/** What the first injector was checked at stands for all; others keep their own where it differs. */
+function sharedChecks(revision: CycleRevision): DraftFields {
+  const fields: DraftFields = {};
+  for (const key of sharedCheckKeys) {
+    const value = revision.injectors.find(({ checks }) => checks[key] !== null)?.checks[key];
+    if (value !== undefined && value !== null) fields[draftField.sharedCheck(key)] = String(value);
+  }
+  return fields;
 }
 
 function columnsOfRevision(revision: CycleRevision) {

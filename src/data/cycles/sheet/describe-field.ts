@@ -14,7 +14,8 @@ export function describeField(field: string, sheet: Pick<Sheet, "columns" | "row
   if (plain[field]) return plain[field];
   if (kind === "conditions" || kind === "checks") return "Conditions";
   if (kind === "column") return columnName(sheet, first);
-  const tag = sheet.rows.find((row) => row.setInjectorId === first)?.tag ?? "An injector no longer in the set";
+  const tag =
+    sheet.rows.find((row) => row.setInjectorId === first)?.tag ?? "An injector no longer in the set";
   if (kind !== "reading") return tag;
   const run = sheet.repeats > 1 ? `, run ${third}` : "";
   return `${tag}, ${columnName(sheet, second)}${run}`;

@@ -37,3 +37,13 @@ function lacking(place: string, instrument: BenchInstrument | null): MissingCali
   if (instrument?.calibration) return [];
   return [{ place, code: instrument?.code ?? null, lapsedAt: instrument?.lapsedAt ?? null }];
 }
+
+/** A cycle can be run on it now: in service, with a channel and everything that every cycle needs in calibration. */
+export function isReady(bench: CycleBench): boolean {
+  return (
+    bench.holdReason === null &&
+    !bench.retired &&
+    bench.channels.some((channel) => channel.instrument?.calibration) &&
+    always.every((kind) => instrumentOf(bench, kind)?.calibration)
+  );
+}

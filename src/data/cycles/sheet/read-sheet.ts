@@ -6,25 +6,25 @@ import {
   draftField,
   heldOpenColumn,
   type SharedCheckKey,
-  valueOf,
+  typedValue,
 } from "../draft-fields";
 import type { InjectorChecks } from "../results";
 import type { DriverKind, Sheet, SheetColumn, SheetInjector, SheetReading, SheetRow } from "./types";
 
 /** Reads the sheet from the texts of its fields. Wrong texts read as null; `problemsOf` names them. */
 export function readSheet(fields: DraftFields, injectors: SheetInjector[]): Sheet {
-  const condition = (key: ConditionKey) => valueOf<number>(fields, draftField.condition(key));
+  const condition = (key: ConditionKey) => typedValue<number>(fields, draftField.condition(key));
   const columns = readColumns(fields);
-  const repeats = Math.max(valueOf<number>(fields, "repeats") ?? 1, highestRun(fields));
+  const repeats = Math.max(typedValue<number>(fields, "repeats") ?? 1, highestRun(fields));
   return {
-    benchId: valueOf(fields, "benchId"),
-    fluidId: valueOf(fields, "fluidId"),
+    benchId: typedValue(fields, "benchId"),
+    fluidId: typedValue(fields, "fluidId"),
     fluidTemperatureC: condition("fluidTemperatureC"),
     pressureKpa: condition("pressureKpa"),
     driveVolts: condition("driveVolts"),
     periodMs: condition("periodMs"),
-    driverKind: valueOf<DriverKind>(fields, draftField.condition("driverKind")),
-    note: valueOf<string>(fields, "note") ?? "",
+    driverKind: typedValue<DriverKind>(fields, draftField.condition("driverKind")),
+    note: typedValue<string>(fields, "note") ?? "",
     repeats,
     columns,
     rows: injectors.map((injector) => readRow(fields, injector, columns, repeats)),
@@ -55,7 +55,7 @@ function orderOf(columnId: string): number {
 
 function readColumns(fields: DraftFields): SheetColumn[] {
   return columnIds(fields).map((id) => {
-    const part = (name: ColumnPart) => valueOf<number>(fields, draftField.column(id, name));
+    const part = (name: ColumnPart) => typedValue<number>(fields, draftField.column(id, name));
     const heldOpen = id === heldOpenColumn;
     return {
       id,
@@ -76,14 +76,14 @@ function readRow(
   const readings: SheetReading[] = [];
   for (let repeat = 1; repeat <= repeats; repeat++)
     for (const { id } of columns) {
-      const amount = valueOf<number>(fields, draftField.reading(setInjectorId, id, repeat));
+      const amount = typedValue<number>(fields, draftField.reading(setInjectorId, id, repeat));
       if (amount !== null) readings.push({ columnId: id, repeat, amount });
     }
   return {
     setInjectorId,
     tag,
-    channelNumber: valueOf(fields, draftField.channel(setInjectorId)),
-    load: valueOf<number>(fields, draftField.load(setInjectorId)) ?? 1,
+    channelNumber: typedValue(fields, draftField.channel(setInjectorId)),
+    load: typedValue<number>(fields, draftField.load(setInjectorId)) ?? 1,
     readings,
     checks: readChecks(fields, setInjectorId),
   };
@@ -91,9 +91,9 @@ function readRow(
 
 /** A value typed for the injector stands before the one typed for all. */
 function readChecks(fields: DraftFields, setInjectorId: string): InjectorChecks {
-  const own = <Value>(key: CheckKey) => valueOf<Value>(fields, draftField.check(setInjectorId, key));
+  const own = <Value>(key: CheckKey) => typedValue<Value>(fields, draftField.check(setInjectorId, key));
   const withShared = (key: SharedCheckKey) =>
-    own<number>(key) ?? valueOf<number>(fields, draftField.sharedCheck(key));
+    own<number>(key) ?? typedValue<number>(fields, draftField.sharedCheck(key));
   const windingOhm = own<number>("windingOhm");
   const leakageMm3PerMin = own<number>("leakageMm3PerMin");
   const [wound, leaked] = [windingOhm !== null, leakageMm3PerMin !== null];

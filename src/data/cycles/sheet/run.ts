@@ -72,7 +72,9 @@ function trueConditions(run: Run): CycleConditions {
 
 /** The timer's uncertainty grows with the width; the middle of those measured stands for all. */
 function typicalWidth(run: Run): number {
-  const widths = run.injectors.flatMap(({ readings }) => readings.map((reading) => reading.pulseWidthMs ?? 0));
+  const widths = run.injectors.flatMap(({ readings }) =>
+    readings.map((reading) => reading.pulseWidthMs ?? 0),
+  );
   const pulsed = widths.filter((width) => width > 0).sort((a, b) => a - b);
   return pulsed[Math.floor(pulsed.length / 2)] ?? 0;
 }

@@ -1,0 +1,18 @@
+import "server-only";
+import { inArray } from "drizzle-orm";
+import type { Transaction } from "../../db/client";
+import { calibrations } from "../../db/schema/calibrations";
+import { Refusal, refused } from "../access/errors";
+import { earlierFiguresOf } from "./earlier-figures";
+import { injectorsOfDraft } from "./injectors-of-draft";
+import { loadBenches } from "./load-benches";
+import { loadFluids } from "./load-fluids";
+import { loadSetBasis } from "./load-set-basis";
+import type { OpenDraft } from "./lock-open-draft";
+import { isAcknowledged } from "./sheet/acknowledge";
+import { describeMissing } from "./sheet/describe-missing";
+import { evaluateSheet } from "./sheet/evaluate-sheet";
+import { instrumentsUsed, missingCalibrations } from "./sheet/missing-calibrations";
+import { problemsOf } from "./sheet/problems-of";
+import { readSheet } from "./sheet/read-sheet";
+import type { CycleBench, Sheet } from "./sheet/types";
