@@ -18,8 +18,7 @@ export function rejectInjector(context: Context, raw: unknown) {
     raw,
     async ({ transaction, input, record }) => {
       const { setInjectorId, reason } = input;
-      const injector = await requireInjector(transaction, setInjectorId);
-      await requireOnTheBench(transaction, injector.setId);
+      const { injector } = await requireInjectorOnTheBench(transaction, setInjectorId);
       if (injector.state !== "in set") throw refused(`${injector.tag} is ${injector.state} already.`);
       await requireOthers(transaction, injector.setId, setInjectorId);
       await transaction
