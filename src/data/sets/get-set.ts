@@ -9,6 +9,7 @@ import { sets } from "../../db/schema/sets";
 import type { Context } from "../access/actor";
 import { type Grant, grantedRight } from "../access/authorize";
 import { notFound } from "../access/errors";
+import { modelColumns } from "../models";
 import { read } from "../read";
 import { getSetInput } from "./inputs";
 import { daysLate, setsWithin } from "./internal";
@@ -84,19 +85,3 @@ async function selectSet(connection: Connection, setId: string, grant: Grant) {
   if (!found) throw notFound("set");
   return found;
 }
-
-const modelColumns = {
-  modelId: injectorModels.id,
-  make: injectorModels.make,
-  partNumber: injectorModels.partNumber,
-  impedanceBand: injectorModels.impedanceBand,
-  resistanceLowOhm: injectorModels.resistanceLowOhm,
-  resistanceHighOhm: injectorModels.resistanceHighOhm,
-  ratedFlowMlPerMin: injectorModels.ratedFlowMlPerMin,
-  ratedFlowBandPercent: injectorModels.ratedFlowBandPercent,
-  ratedPressureKpa: injectorModels.ratedPressureKpa,
-  leakageLimitMm3PerMin: injectorModels.leakageLimitMm3PerMin,
-  leakagePressureKpa: injectorModels.leakagePressureKpa,
-  sprayType: injectorModels.sprayType,
-  confirmed: sql<boolean>`${injectorModels.confirmedAt} is not null`,
-};

@@ -1,14 +1,13 @@
 import type {
   handOverWays,
-  impedanceBands,
   injectorConditions,
   injectorStates,
   Phase,
   photoKinds,
   Stage,
-  sprayTypes,
   workItems,
 } from "../../db/vocabulary";
+import type { Model } from "../models";
 
 export type WorkItem = (typeof workItems)[number];
 export type InjectorCondition = (typeof injectorConditions)[number];
@@ -21,7 +20,7 @@ export type SetDetail = {
   version: number;
   stage: Stage;
   customer: SetCustomer;
-  model: SetModel;
+  model: Model;
   toleranceClass: SetToleranceClass;
   workAsked: WorkItem[];
   customerRequest: string;
@@ -50,23 +49,6 @@ export type SetCustomer = {
   contactName: string | null;
   email: string | null;
   phone: string | null;
-};
-
-export type SetModel = {
-  modelId: string;
-  make: string;
-  partNumber: string;
-  impedanceBand: (typeof impedanceBands)[number];
-  resistanceLowOhm: number;
-  resistanceHighOhm: number;
-  ratedFlowMlPerMin: number;
-  ratedFlowBandPercent: number;
-  ratedPressureKpa: number;
-  leakageLimitMm3PerMin: number;
-  leakagePressureKpa: number;
-  sprayType: (typeof sprayTypes)[number];
-  /** False while the manager has not looked at a model entered at the counter. */
-  confirmed: boolean;
 };
 
 /** The class's latest revision: what the set would be judged by today. */
