@@ -1,0 +1,9 @@
+export type StatusKind =
+  | "pass"
+  | "conditional pass"
+  | "conditional fail"
+  | "fail"
+  | "held"
+  | "late"
+  | "due"
+  | "neutral";
