@@ -1,0 +1,15 @@
+import "server-only";
+
+export { releaseMeaning } from "./content/build-content";
+export { certifyInjectors } from "./content/certify-injectors";
+export { certifyPhase } from "./content/certify-phase";
+export { type CertificateDetail, type CertificateRevision, getCertificate } from "./get-certificate";
+export { getCertificateFile } from "./get-certificate-file";
+export { getDataSheet } from "./get-data-sheet";
+export { type CertificateRow, listCertificates } from "./list-certificates";
+export { recordersOf } from "./recorders-of";
+export { reissueCertificate } from "./reissue-certificate";
+export { releaseCertificate } from "./release-certificate";
+export { revokeCertificate } from "./revoke-certificate";
+export { seenRecords } from "./seen-records";
+export { sendBackSet } from "./send-back-set";

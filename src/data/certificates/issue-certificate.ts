@@ -1,0 +1,68 @@
+import "server-only";
+import { createHash } from "node:crypto";
+import { version as programVersion } from "../../../package.json";
+import type { Transaction } from "../../db/client";
+import { blobs } from "../../db/schema/blobs";
+import { certificates } from "../../db/schema/certificates";
+import { renderCertificate } from "../../documents/certificate/render-certificate";
+import { buildContent, type Issue } from "./content/build-content";
+import { loadBasis } from "./load-basis";
+import { lockCalibrations } from "./lock-calibrations";
+import type { Reviewed } from "./require-as-seen";
+import { makeVerificationCode } from "./verification-code";
+
+type Wanted = Omit<Issue, "verificationCode" | "programVersion">;
+type Stored = { series: string; replacesId: string | null };
+
+/**
+ * Builds, draws and stores a certificate. Drawing takes well under a second and stays inside the transaction: only then are
+ * the stored bytes those of the stored content, with a number that no refusal can have used up.
+ */
+export async function issueCertificate(
+  transaction: Transaction,
+  reviewed: Reviewed,
+  wanted: Wanted,
+  { series, replacesId }: Stored,
+) {
+  const { set, results } = reviewed;
+  await lockCalibrations(transaction, [
+    ...results.asFound.latest.calibrations,
+    ...results.asLeft.latest.calibrations,
+  ]);
+  const basis = await loadBasis(transaction, set);
+  const issue = { ...wanted, verificationCode: makeVerificationCode(), programVersion };
+  const content = buildContent(reviewed, basis, issue);
+  const bytes = await renderCertificate(
+    content,
+    new Map(basis.sprayPhotos.map((photo) => [photo.sha256, photo.bytes])),
+  );
+  const pdfSha256 = sha256(bytes);
+  await transaction
+    .insert(blobs)
+    .values({ sha256: pdfSha256, mediaType: "application/pdf", sizeBytes: bytes.length, bytes });
+  const [stored] = await transaction
+    .insert(certificates)
+    .values({
+      number: issue.number,
+      series,
+      revision: issue.revision,
+      setId: set.setId,
+      replacesId,
+      replacementReason: issue.replaces?.reason ?? null,
+      asFoundRevisionId: results.asFound.latest.cycleRevisionId,
+      asLeftRevisionId: results.asLeft.latest.cycleRevisionId,
+      toleranceClassRevisionId: results.toleranceClass.toleranceClassRevisionId,
+      content,
+      contentSha256: sha256(JSON.stringify(content)),
+      pdfSha256,
+      verificationCode: issue.verificationCode,
+      programVersion,
+      releasedBy: issue.releaser.personId,
+    })
+    .returning({ certificateId: certificates.id });
+  return { certificateId: stored!.certificateId, number: issue.number, pdfSha256 };
+}
+
+function sha256(data: string | Uint8Array): string {
+  return createHash("sha256").update(data).digest("hex");
+}
