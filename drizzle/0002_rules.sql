@@ -36,6 +36,15 @@ END $$;
 CREATE TRIGGER activity_chained BEFORE INSERT ON activity FOR EACH ROW EXECUTE FUNCTION chain_activity();
 --> statement-breakpoint
 
+-- What every lab starts from, before its manager says who it is. Density of n-heptane at 20 °C: Span and Wagner 2003.
+INSERT INTO fluids (name, source) VALUES ('n-heptane', 'Span and Wagner 2003');
+--> statement-breakpoint
+INSERT INTO lab_details (name, reference_fluid, reference_density_g_per_ml, test_plan) VALUES ('Our laboratory', 'n-heptane at 20 °C', 0.683815,
+  '{"widths": [{"pulseWidthMs": 1.5, "pulseCount": 3000}, {"pulseWidthMs": 2, "pulseCount": 2000}, {"pulseWidthMs": 3, "pulseCount": 1000},
+    {"pulseWidthMs": 4, "pulseCount": 1000}, {"pulseWidthMs": 6, "pulseCount": 1000}, {"pulseWidthMs": 8, "pulseCount": 1000},
+    {"pulseWidthMs": 10, "pulseCount": 1000}], "heldOpenSeconds": 10}');
+--> statement-breakpoint
+
 -- The course of a set.
 INSERT INTO stage_moves (from_stage, to_stage) VALUES
   ('checked in', 'as found'),
@@ -181,7 +190,7 @@ BEGIN
        WHERE cycle_revision_id IN (NEW.as_found_revision_id, NEW.as_left_revision_id)
       UNION SELECT calibration_id FROM cycle_instruments
        WHERE cycle_revision_id IN (NEW.as_found_revision_id, NEW.as_left_revision_id)
-    ) used JOIN calibrations USING (calibration_id) WHERE ended_at IS NOT NULL
+    ) used JOIN calibrations USING (calibration_id) WHERE ended_as IN ('corrected', 'revoked')
   ) THEN
     PERFORM refuse('certificates_calibration_unrevoked', 'A calibration that it rests on is no longer in force.');
   END IF;

@@ -6,7 +6,7 @@ GRANT SELECT, INSERT ON ALL TABLES IN SCHEMA public TO evenrail_app;
 --> statement-breakpoint
 ALTER DEFAULT PRIVILEGES IN SCHEMA public GRANT SELECT, INSERT ON TABLES TO evenrail_app;
 --> statement-breakpoint
-REVOKE INSERT ON stage_moves, activity_head, record_clock FROM evenrail_app;
+REVOKE INSERT ON stage_moves, activity_head, record_clock, lab_details FROM evenrail_app;
 --> statement-breakpoint
 GRANT UPDATE ON people, customers, injector_models, tolerance_classes, lab_details, fluids, instruments, benches,
   sessions, entry_links, throttle_counters, number_series, idempotency_keys TO evenrail_app;
@@ -24,7 +24,7 @@ GRANT UPDATE (hidden_by, hidden_at, hidden_reason) ON photos TO evenrail_app;
 --> statement-breakpoint
 GRANT UPDATE (until_at) ON bench_instruments TO evenrail_app;
 --> statement-breakpoint
-GRANT UPDATE (ended_at, ended_by, ended_reason) ON calibrations TO evenrail_app;
+GRANT UPDATE (ended_as, ended_at, ended_by, ended_reason) ON calibrations TO evenrail_app;
 --> statement-breakpoint
 GRANT UPDATE (fields, version, saved_by, saved_at, closed_at, recorded_revision_id, put_away_reason)
   ON cycle_drafts TO evenrail_app;

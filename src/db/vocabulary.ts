@@ -39,6 +39,7 @@ export const instrumentKinds = [
   "pulse timer",
   "drive supply",
 ] as const;
+export const calibrationEnds = ["replaced", "corrected", "revoked"] as const;
 export const handOverWays = ["collected", "courier", "post", "our delivery"] as const;
 export const photoKinds = ["intake", "spray"] as const;
 export const certificateStates = ["current", "superseded", "revoked"] as const;

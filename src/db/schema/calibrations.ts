@@ -1,7 +1,8 @@
 import "server-only";
 import { sql } from "drizzle-orm";
 import { type AnyPgColumn, check, index, pgTable, text, uuid } from "drizzle-orm/pg-core";
-import { between, instant, key, longest, measured, recordedAt } from "../columns";
+import { between, instant, key, longest, measured, oneOf, recordedAt } from "../columns";
+import { calibrationEnds } from "../vocabulary";
 import { instruments } from "./instruments";
 import { people } from "./people";
 
@@ -31,7 +32,8 @@ export const calibrations = pgTable(
     recordedAt: recordedAt("recorded_at"),
     correctsId: uuid("corrects_id").references((): AnyPgColumn => calibrations.id),
     correctionReason: text("correction_reason"),
-    /** Out of force: revoked, or corrected by a later entry. */
+    /** Out of force before its day: what it was replaced by starts then, or it should not be relied upon. */
+    endedAs: text("ended_as", { enum: calibrationEnds }),
     endedAt: instant("ended_at"),
     endedBy: uuid("ended_by").references(() => people.id),
     endedReason: text("ended_reason"),
@@ -39,6 +41,8 @@ export const calibrations = pgTable(
   (table) => [
     index("calibrations_by_instrument").on(table.instrumentId, table.validUntil),
     check("calibrations_period", sql`${table.validFrom} < ${table.validUntil}`),
+    check("calibrations_end", sql`(${table.endedAt} is null) = (${table.endedAs} is null)`),
+    oneOf("calibrations_end_known", table.endedAs, calibrationEnds),
     between("calibrations_gain", table.gain, 0.5, 2),
     between("calibrations_offset", table.offset, -10000, 10000),
     between("calibrations_gain_u", table.gainU, 0, 0.5),
