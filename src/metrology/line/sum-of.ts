@@ -1,0 +1,16 @@
+/**
+ * Sum of numbers with the rounding errors carried along, so that neither their order nor their count costs digits.
+ *
+ * Units: those of the values; range: any whose sum is finite; an empty list gives 0.
+ * Source: A. Neumaier, "Rundungsfehleranalyse einiger Verfahren zur Summation endlicher Summen", ZAMM 54 (1974) 39-51.
+ */
+export function sumOf(values: Iterable<number>): number {
+  let sum = 0;
+  let lost = 0;
+  for (const value of values) {
+    const next = sum + value;
+    lost += Math.abs(sum) >= Math.abs(value) ? sum - next + value : value - next + sum;
+    sum = next;
+  }
+  return sum + lost;
+}
