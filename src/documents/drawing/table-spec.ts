@@ -1,0 +1,20 @@
+import "server-only";
+import type { MarkKind } from "./marks";
+import type { TextStyle } from "./print-style";
+
+export type CellLine = { text: string; style: TextStyle; mark?: MarkKind };
+
+/** Lines one below the other. */
+export type Cell = readonly CellLine[];
+
+export type Column = {
+  /** Lines of the head. */
+  title: readonly string[];
+  align: "left" | "right";
+  /** Share of the room that is left over; such a column wraps its text instead of claiming its natural width. */
+  flex?: number;
+};
+
+export type Row = { cells: readonly Cell[]; rule?: "strong" };
+
+export type TableSpec = { columns: readonly Column[]; rows: readonly Row[] };
