@@ -1,8 +1,7 @@
 import "server-only";
-import { and, asc, eq, isNull } from "drizzle-orm";
+import { and, eq, isNull } from "drizzle-orm";
 import type { Connection } from "../../db/client";
 import { cycleDrafts, cycles } from "../../db/schema/cycles";
-import { fluids } from "../../db/schema/fluids";
 import { people } from "../../db/schema/people";
 import { setHolds } from "../../db/schema/sets";
 import type { Context } from "../access/actor";
@@ -12,6 +11,7 @@ import { earlierFiguresOf } from "./earlier-figures";
 import { injectorsOfDraft } from "./injectors-of-draft";
 import { getCycleDraftInput } from "./inputs";
 import { loadBenches } from "./load-benches";
+import { loadFluids } from "./load-fluids";
 import { loadReadingFiles } from "./load-reading-files";
 import { loadSetBasis } from "./load-set-basis";
 
@@ -24,7 +24,7 @@ export function getCycleDraft(context: Context, raw: unknown) {
     const [injectors, benches, allFluids, earlier, files, hold] = await Promise.all([
       injectorsOfDraft(connection, draft),
       loadBenches(connection, measuredAt ? { at: measuredAt } : {}),
-      selectFluids(connection),
+      loadFluids(connection),
       earlierFiguresOf(connection, draft, basis),
       loadReadingFiles(connection, draft.setId),
       selectHold(connection, draft.setId),
@@ -46,6 +46,7 @@ export function getCycleDraft(context: Context, raw: unknown) {
       reference: basis.reference,
       toleranceClass: basis.toleranceClass,
       workAsked: basis.workAsked,
+      zone: basis.zone,
       injectors,
       benches,
       fluids: allFluids,
@@ -64,19 +65,6 @@ async function requireDraft(connection: Connection, draftId: string) {
     .where(eq(cycleDrafts.id, draftId));
   if (!row) throw notFound("draft");
   return row;
-}
-
-function selectFluids(connection: Connection) {
-  return connection
-    .select({
-      fluidId: fluids.id,
-      name: fluids.name,
-      densityAt15GPerMl: fluids.densityAt15GPerMl,
-      expansionPerK: fluids.expansionPerK,
-    })
-    .from(fluids)
-    .where(isNull(fluids.retiredAt))
-    .orderBy(asc(fluids.name));
 }
 
 async function selectHold(connection: Connection, setId: string): Promise<string | null> {

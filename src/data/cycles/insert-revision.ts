@@ -3,7 +3,7 @@ import type { Transaction } from "../../db/client";
 import { cycleInjectors, cycleInstruments, cycleRevisions } from "../../db/schema/cycles";
 import { injectorChecks, readings } from "../../db/schema/readings";
 import type { AcknowledgedFinding } from "./results";
-import { instrumentsUsed } from "./sheet/missing-calibrations";
+import { ownInstrumentsUsed } from "./sheet/missing-calibrations";
 import { readingsOf } from "./sheet/run-of-sheet";
 import type { CycleBench, Sheet, SheetRow } from "./sheet/types";
 
@@ -30,7 +30,7 @@ export async function insertRevision(transaction: Transaction, entry: NewRevisio
     .insert(cycleInjectors)
     .values(sheet.rows.map((row) => ({ revisionId, ...placeOf(bench, row) })));
   await transaction.insert(cycleInstruments).values(
-    instrumentsUsed(bench, sheet).map(({ instrumentId, calibration }) => ({
+    ownInstrumentsUsed(bench, sheet).map(({ instrumentId, calibration }) => ({
       revisionId,
       instrumentId,
       calibrationId: calibration!.calibrationId,

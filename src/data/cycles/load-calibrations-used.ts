@@ -13,6 +13,7 @@ const columns = {
   instrumentCode: instruments.code,
   kind: instruments.kind,
   division: instruments.division,
+  rangeHigh: instruments.rangeHigh,
   reference: calibrations.reference,
   validFrom: calibrations.validFrom,
   validUntil: calibrations.validUntil,

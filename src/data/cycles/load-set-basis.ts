@@ -33,6 +33,7 @@ function selectBasis(connection: Connection, setIds: string[]) {
       workAsked: sets.workAsked,
       customerName: customers.name,
       toleranceClassId: sets.toleranceClassId,
+      zone: labDetails.timeZone,
       model: {
         make: injectorModels.make,
         partNumber: injectorModels.partNumber,

@@ -91,6 +91,7 @@ export type UsedCalibration = {
   /** Null for the bench's own gauge, thermometer, ohmmeter, timer and supply. */
   channelNumber: number | null;
   division: number;
+  rangeHigh: number;
   reference: string;
   validFrom: Date;
   validUntil: Date;
@@ -139,8 +140,15 @@ export type MeasuredInjector = RecordedInjector & {
   tag: string;
   serial: string | null;
   state: "in set" | "rejected" | "replaced";
-  /** Winding at 20 °C; null when it was not measured. `bandVerdict` is against the model's band. */
-  resistance: { ohmsAt20C: number; expandedUncertainty: number; bandVerdict: Verdict } | null;
+  resistance: WindingResult | null;
+};
+
+/** Winding at 20 °C, judged against the model's band. A winding measured as found only counts as left too. */
+export type WindingResult = {
+  ohmsAt20C: number;
+  expandedUncertainty: number;
+  bandVerdict: Verdict;
+  measured: Phase;
 };
 
 /** A reading that is in doubt, with the reason as a sentence. */

@@ -8,23 +8,33 @@ const always: InstrumentKind[] = ["pressure gauge", "thermometer", "pulse timer"
 
 /** What is out of calibration for this sheet: the channels it uses and the bench's own instruments. */
 export function missingCalibrations(bench: CycleBench, sheet: Sheet): MissingCalibration[] {
-  const used = new Set(sheet.rows.map((row) => row.channelNumber));
-  const channels = bench.channels.filter((channel) => used.has(channel.number));
-  const windings = sheet.rows.some((row) => row.checks.windingOhm !== null);
   return [
-    ...channels.flatMap(({ number, instrument }) => lacking(`channel ${number}`, instrument)),
-    ...kindsUsed(bench, windings).flatMap((kind) => lacking(kind, instrumentOf(bench, kind))),
+    ...channelsUsed(bench, sheet).flatMap(({ number, instrument }) =>
+      lacking(`channel ${number}`, instrument),
+    ),
+    ...kindsUsed(bench, sheet).flatMap((kind) => lacking(kind, instrumentOf(bench, kind))),
   ];
 }
 
-/** The bench's instruments that this sheet rests on. */
+/** The bench's own instruments that this sheet rests on. */
+export function ownInstrumentsUsed(bench: CycleBench, sheet: Sheet): BenchInstrument[] {
+  return kindsUsed(bench, sheet).flatMap((kind) => instrumentOf(bench, kind) ?? []);
+}
+
+/** Every instrument that this sheet rests on, cylinders and balances of its channels included. */
 export function instrumentsUsed(bench: CycleBench, sheet: Sheet): BenchInstrument[] {
-  const windings = sheet.rows.some((row) => row.checks.windingOhm !== null);
-  return kindsUsed(bench, windings).flatMap((kind) => instrumentOf(bench, kind) ?? []);
+  const ofChannels = channelsUsed(bench, sheet).flatMap((channel) => channel.instrument ?? []);
+  return [...ofChannels, ...ownInstrumentsUsed(bench, sheet)];
+}
+
+function channelsUsed(bench: CycleBench, sheet: Sheet) {
+  const used = new Set(sheet.rows.map((row) => row.channelNumber));
+  return bench.channels.filter((channel) => used.has(channel.number));
 }
 
 /** A drive supply counts where the bench has one of its own; an ohmmeter when windings were measured. */
-function kindsUsed(bench: CycleBench, windings: boolean): InstrumentKind[] {
+function kindsUsed(bench: CycleBench, sheet: Sheet): InstrumentKind[] {
+  const windings = sheet.rows.some((row) => row.checks.windingOhm !== null);
   const supply: InstrumentKind[] = instrumentOf(bench, "drive supply") ? ["drive supply"] : [];
   return [...always, ...supply, ...(windings ? (["ohmmeter"] as const) : [])];
 }

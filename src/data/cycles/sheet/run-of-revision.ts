@@ -1,5 +1,5 @@
-import type { CycleRevision } from "../results";
-import { fluidOf, type Run } from "./run";
+import type { CycleRevision, UsedCalibration } from "../results";
+import { type Calibrated, fluidOf, type Run } from "./run";
 
 /** A recorded revision as a run that can be evaluated; `only` leaves out injectors that no longer count. */
 export function runOfRevision(revision: CycleRevision, only?: Set<string>): Run {
@@ -16,7 +16,7 @@ export function runOfRevision(revision: CycleRevision, only?: Set<string>): Run 
     instruments: Object.fromEntries(
       revision.calibrations
         .filter((used) => used.channelNumber === null)
-        .map((used) => [used.kind, { division: used.division, calibration: used }]),
+        .map((used) => [used.kind, calibrated(used)]),
     ),
     injectors: kept.map((injector) => ({
       setInjectorId: injector.setInjectorId,
@@ -26,7 +26,11 @@ export function runOfRevision(revision: CycleRevision, only?: Set<string>): Run 
   };
 }
 
-function channelOf(revision: CycleRevision, channelNumber: number) {
+function channelOf(revision: CycleRevision, channelNumber: number): Calibrated {
   const used = revision.calibrations.find((calibration) => calibration.channelNumber === channelNumber);
-  return used ? { division: used.division, calibration: used } : { division: 0, calibration: null };
+  return used ? calibrated(used) : { division: 0, rangeHigh: Number.POSITIVE_INFINITY, calibration: null };
+}
+
+function calibrated(used: UsedCalibration): Calibrated {
+  return { division: used.division, rangeHigh: used.rangeHigh, calibration: used };
 }

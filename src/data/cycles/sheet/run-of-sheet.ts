@@ -1,7 +1,7 @@
 import type { FlowReference } from "../../../metrology/cycle/types";
 import type { RecordedReading } from "../results";
 import { instrumentOf } from "./missing-calibrations";
-import { fluidOf, type Run } from "./run";
+import { type Calibrated, fluidOf, type Run } from "./run";
 import type { CycleBench, Sheet, SheetRow } from "./types";
 
 export type SheetFluid = {
@@ -59,7 +59,8 @@ export function runOfSheet(sheet: Sheet, { bench, fluids, reference }: Beside): 
   };
 }
 
-function channelOf(bench: CycleBench, row: SheetRow) {
+function channelOf(bench: CycleBench, row: SheetRow): Calibrated {
   const channel = bench.channels.find((candidate) => candidate.number === row.channelNumber);
-  return channel?.instrument ?? bench.channels[0]?.instrument ?? { division: 0, calibration: null };
+  const stand = channel?.instrument ?? bench.channels[0]?.instrument;
+  return stand ?? { division: 0, rangeHigh: Number.POSITIVE_INFINITY, calibration: null };
 }

@@ -5,8 +5,9 @@ import type { RecordedReading } from "../results";
 import { conditionOf } from "./condition";
 import type { DriverKind } from "./types";
 
-type Calibrated = {
+export type Calibrated = {
   division: number;
+  rangeHigh: number;
   calibration: { gain: number; offset: number; gainU: number; offsetU: number } | null;
 };
 

@@ -107,10 +107,6 @@ export class DraftStore {
     this.#set({ status: "closed", message });
   }
 
-  dispose(): void {
-    clearTimeout(this.#timer);
-  }
-
   async #send(leaving: boolean): Promise<void> {
     const { state, status } = this.#snapshot;
     if (status === "closed") return;

@@ -9,9 +9,11 @@ export type GridRow =
 
 export type GridColumn =
   | { kind: "label"; id: string }
-  | { kind: "channel" | "load"; id: string }
-  | { kind: "width" | "heldOpen"; id: string; columnId: string }
-  | { kind: "check"; id: string; key: CheckKey };
+  | { kind: "channel"; id: string }
+  | { kind: "load"; id: string }
+  | { kind: "width"; id: string; columnId: string }
+  | { kind: "heldOpen"; id: string; columnId: string }
+  | { kind: "check"; id: string; key: GridCheck };
 
 export type GridModel = {
   top: GridRow[];
@@ -28,6 +30,7 @@ export const gridChecks = [
   "sprayGrade",
   "note",
 ] as const satisfies CheckKey[];
+export type GridCheck = (typeof gridChecks)[number];
 
 /** Which rows and columns the grid shows: injectors by place, run after run, with the checks in the first run. */
 export function gridModelOf(sheet: Sheet, injectors: SheetInjector[], loads: boolean): GridModel {
