@@ -722,6 +722,7 @@ CREATE UNIQUE INDEX "cycles_in_order" ON "cycles" USING btree ("set_id","phase",
 CREATE INDEX "reading_files_by_draft" ON "reading_files" USING btree ("cycle_draft_id");--> statement-breakpoint
 CREATE UNIQUE INDEX "fluids_one_per_name" ON "fluids" USING btree (lower("name"));--> statement-breakpoint
 CREATE UNIQUE INDEX "injectors_one_per_serial" ON "injectors" USING btree ("injector_model_id",upper("serial"));--> statement-breakpoint
+CREATE INDEX "injectors_by_serial_parts" ON "injectors" USING gin (lower("serial") gin_trgm_ops);--> statement-breakpoint
 CREATE UNIQUE INDEX "set_injectors_one_per_tag" ON "set_injectors" USING btree ("tag");--> statement-breakpoint
 CREATE UNIQUE INDEX "set_injectors_one_per_position" ON "set_injectors" USING btree ("set_id","position") WHERE "set_injectors"."state" = 'in set';--> statement-breakpoint
 CREATE UNIQUE INDEX "set_injectors_one_open_set" ON "set_injectors" USING btree ("injector_id") WHERE "set_injectors"."in_house";--> statement-breakpoint
@@ -744,6 +745,7 @@ CREATE UNIQUE INDEX "set_holds_one_open" ON "set_holds" USING btree ("set_id") W
 CREATE INDEX "set_holds_by_set" ON "set_holds" USING btree ("set_id","held_at");--> statement-breakpoint
 CREATE INDEX "set_steps_by_set" ON "set_steps" USING btree ("set_id","at");--> statement-breakpoint
 CREATE UNIQUE INDEX "sets_one_per_number" ON "sets" USING btree ("number");--> statement-breakpoint
+CREATE INDEX "sets_by_number_parts" ON "sets" USING gin ("number" gin_trgm_ops);--> statement-breakpoint
 CREATE INDEX "sets_by_stage" ON "sets" USING btree ("stage","promised_on");--> statement-breakpoint
 CREATE INDEX "sets_by_promise" ON "sets" USING btree ("promised_on","set_id");--> statement-breakpoint
 CREATE INDEX "sets_by_customer" ON "sets" USING btree ("customer_id","checked_in_at");--> statement-breakpoint

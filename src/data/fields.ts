@@ -130,6 +130,15 @@ export function writeInput<Shape extends z.ZodRawShape>(shape: Shape) {
   return z.object({ idempotencyKey, ...shape });
 }
 
+/** What is looked for: what could not be stored anywhere is left out, and nothing is refused. */
+export function searched(longest = 160) {
+  return z
+    .string()
+    .max(longest)
+    .catch("")
+    .transform((typed) => typed.normalize("NFC").replace(new RegExp(unstorable, "gu"), "").trim());
+}
+
 export const noInput = z.undefined().or(z.null()).or(z.object({}));
 
 /** Paging of a list: clamped, never refused. */

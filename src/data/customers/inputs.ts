@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { baseVersion, email, id, optionalText, page, text, writeInput } from "../fields";
+import { baseVersion, email, id, optionalText, page, searched, text, writeInput } from "../fields";
 
 /** The customer's own data; part of check-in too, where a new customer is entered in the same form. */
 export const customerFields = {
@@ -24,5 +24,5 @@ export const editCustomerInput = writeInput({
   ...customerFields,
 });
 export const getCustomerInput = z.object({ customerId: id("customer") });
-export const findCustomersInput = z.object({ search: z.string().max(160).catch("") });
-export const listCustomersInput = page.extend({ search: z.string().max(160).catch("") });
+export const findCustomersInput = z.object({ search: searched() });
+export const listCustomersInput = page.extend({ search: searched() });

@@ -17,7 +17,7 @@ export function findModels(context: Context, raw: unknown) {
       .from(injectorModels)
       .where(containing(modelName, input.search))
       .orderBy(
-        sql`position(${input.search.trim().toLowerCase()} in ${modelName})`,
+        sql`position(${input.search.toLowerCase()} in ${modelName})`,
         asc(modelName),
         asc(injectorModels.id),
       )

@@ -1,8 +1,9 @@
 import "server-only";
 import { recordNow } from "../../db/columns";
+import { brokenConstraint } from "../../db/lost-connection";
 import { injectorModels } from "../../db/schema/models";
 import type { Context } from "../access/actor";
-import { Refusal } from "../access/errors";
+import { Refusal, refused } from "../access/errors";
 import { type CsvProblem, mostProblems } from "../read-csv";
 import { write } from "../write";
 import { compareWithKnown } from "./compare-with-known";
@@ -16,7 +17,14 @@ export function importModels(context: Context, raw: unknown) {
     const compared = await compareWithKnown(transaction, lines);
     refuseProblems([...problems, ...compared.problems]);
     const added = compared.fresh.map(({ values }) => ({ ...values, confirmedAt: recordNow }));
-    if (added.length > 0) await transaction.insert(injectorModels).values(added);
+    if (added.length > 0)
+      await transaction
+        .insert(injectorModels)
+        .values(added)
+        .catch((error: unknown) => {
+          if (!brokenConstraint(error)) throw error;
+          throw refused("Somebody added one of these models just now. Please look at the preview again.");
+        });
     await record({
       event: "models imported",
       noun: "model",

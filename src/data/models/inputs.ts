@@ -1,6 +1,6 @@
 import { z } from "zod";
 import { impedanceBands, sprayTypes } from "../../db/vocabulary";
-import { baseVersion, choice, decimal, id, page, text, writeInput } from "../fields";
+import { baseVersion, choice, decimal, id, page, searched, text, writeInput } from "../fields";
 
 /** An injector model's own data; part of check-in too, where a new model is entered in the same form. */
 export const modelFields = {
@@ -74,11 +74,10 @@ export const editModelInput = writeInput({
   ...modelFields,
 }).refine(resistancesInOrder, resistancesOutOfOrder);
 
-const search = z.string().max(160).catch("");
 export const getModelInput = z.object({ modelId: id("model") });
-export const findModelsInput = z.object({ search });
+export const findModelsInput = z.object({ search: searched() });
 export const listModelsInput = page.extend({
-  search,
+  search: searched(),
   /** Only those entered at the counter that nobody has looked at yet. */
   unconfirmed: z.coerce.boolean().catch(false),
 });

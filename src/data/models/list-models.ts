@@ -13,7 +13,7 @@ export function listModels(context: Context, raw: unknown) {
   return read(context, "listModels", listModelsInput, raw, async ({ connection, input }) => {
     const { offset, limit } = pageOf(input);
     const where = and(
-      input.search.trim() ? containing(modelName, input.search) : undefined,
+      input.search ? containing(modelName, input.search) : undefined,
       input.unconfirmed ? isNull(injectorModels.confirmedAt) : undefined,
     );
     const [rows, [all]] = await Promise.all([

@@ -3,6 +3,7 @@ import { type CsvProblem, type CsvRow, decodeCsv, mostProblems, readCsv } from "
 import { type ModelValues, modelColumnNames, modelValues } from "./inputs";
 
 export type ModelLine = { line: number; values: ModelValues };
+const mostModels = 2000;
 type Fields = (keyof ModelValues)[];
 
 const fieldOf = new Map(
@@ -56,6 +57,8 @@ class ModelLines {
     const name = `${parsed.data.make} ${parsed.data.partNumber}`.toLowerCase();
     const first = this.lineOfName.get(name);
     if (first) this.problems.push(problem(line, "part_number", `Line ${first} lists the same model.`));
+    if (this.lines.length === mostModels)
+      this.problems.push(problem(line, null, `A file lists at most ${mostModels} models. Please split it.`));
     this.lineOfName.set(name, line);
     this.lines.push({ line, values: parsed.data });
   }

@@ -1,13 +1,15 @@
 import "server-only";
-import { and, asc, eq, sql } from "drizzle-orm";
+import { and, asc, eq } from "drizzle-orm";
 import type { Transaction } from "../../db/client";
 import { brokenConstraint } from "../../db/lost-connection";
-import { injectors, setInjectors } from "../../db/schema/injectors";
+import { setInjectors } from "../../db/schema/injectors";
 import type { Context } from "../access/actor";
 import { invalid, refused } from "../access/errors";
 import { write } from "../write";
 import { replaceInjectorInput } from "./injector-inputs";
+import { knowInjectors } from "./know-injectors";
 import { requireInjectorOnTheBench } from "./reject-injector";
+import { refuseStillInASet } from "./still-in-a-set";
 
 /** Puts another injector in the place of a rejected one, under the same tag with a letter. */
 export function replaceInjector(context: Context, raw: unknown) {
@@ -27,10 +29,11 @@ export function replaceInjector(context: Context, raw: unknown) {
         .update(setInjectors)
         .set({ state: "replaced" })
         .where(eq(setInjectors.id, setInjectorId));
-      const injectorId = await injectorOf(transaction, set.modelId, serial);
+      const [injectorId] = await knowInjectors(transaction, set.modelId, [serial || null]);
+      await refuseStillInASet(transaction, setId, [{ injectorId: injectorId!, serial, field: "serial" }]);
       const [added] = await transaction
         .insert(setInjectors)
-        .values({ setId, injectorId, position, tag, ...described, replacesId: setInjectorId })
+        .values({ setId, injectorId: injectorId!, position, tag, ...described, replacesId: setInjectorId })
         .returning({ id: setInjectors.id })
         .catch((error: unknown) => {
           throw brokenConstraint(error) === "set_injectors_one_open_set"
@@ -60,25 +63,4 @@ async function nextTag(transaction: Transaction, setId: string, position: number
   const first = inPlace.find((injector) => injector.replacesId === null);
   if (!first || inPlace.length >= 26) throw refused("This place was replaced too often.");
   return first.tag + String.fromCharCode("A".charCodeAt(0) + inPlace.length);
-}
-
-/** An injector whose serial is known is the same one, with its history. */
-async function injectorOf(transaction: Transaction, modelId: string, serial: string): Promise<string> {
-  const [known] = serial
-    ? await transaction
-        .select({ id: injectors.id })
-        .from(injectors)
-        .where(
-          and(
-            eq(injectors.injectorModelId, modelId),
-            eq(sql`upper(${injectors.serial})`, serial.toUpperCase()),
-          ),
-        )
-    : [];
-  if (known) return known.id;
-  const [added] = await transaction
-    .insert(injectors)
-    .values({ injectorModelId: modelId, serial: serial || null })
-    .returning({ id: injectors.id });
-  return added!.id;
 }

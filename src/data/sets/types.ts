@@ -7,6 +7,7 @@ import type {
   Stage,
   workItems,
 } from "../../db/vocabulary";
+import type { RailStripValues } from "../cycles/results";
 import type { Model } from "../models";
 
 export type WorkItem = (typeof workItems)[number];
@@ -111,4 +112,32 @@ export type HandOver = {
   consignment: string;
   handedOverBy: string;
   at: Date;
+};
+
+export type KnownInjector = {
+  serial: string;
+  injectorId: string;
+  /** The number of the set it has not left yet. */
+  openSet: string | null;
+  /** Newest first. */
+  visits: EarlierVisit[];
+};
+
+/** A set as a list shows it. */
+export type SetRow = {
+  setId: string;
+  number: string;
+  customerId: string;
+  customer: string;
+  model: string;
+  /** Those in the set now, without rejected and replaced ones. */
+  injectors: number;
+  stage: Stage;
+  /** The reason, while it is on hold. */
+  hold: string | null;
+  promisedOn: string;
+  /** Days past the promise while the set is worked on; 0 otherwise. */
+  daysLate: number;
+  checkedInAt: Date;
+  rail: RailStripValues | null;
 };

@@ -29,6 +29,7 @@ export const injectors = pgTable(
   },
   (table) => [
     uniqueIndex("injectors_one_per_serial").on(table.injectorModelId, sql`upper(${table.serial})`),
+    index("injectors_by_serial_parts").using("gin", sql`lower(${table.serial}) gin_trgm_ops`),
     longest("injectors_serial_length", table.serial, 60),
   ],
 );

@@ -37,6 +37,7 @@ export const sets = pgTable(
   },
   (table) => [
     uniqueIndex("sets_one_per_number").on(table.number),
+    index("sets_by_number_parts").using("gin", sql`${table.number} gin_trgm_ops`),
     index("sets_by_stage").on(table.stage, table.promisedOn),
     index("sets_by_promise").on(table.promisedOn, table.id),
     index("sets_by_customer").on(table.customerId, table.checkedInAt),
