@@ -1,7 +1,7 @@
 import "server-only";
 import { setReviews } from "../../db/schema/certificates";
 import type { Context } from "../access/actor";
-import { moveStage } from "../sets";
+import { moveStage } from "../course";
 import { takeNumber } from "../take-number";
 import { write } from "../write";
 import { releaseCertificateInput } from "./inputs";

@@ -2,7 +2,7 @@ import "server-only";
 import { setReviews } from "../../db/schema/certificates";
 import type { Context } from "../access/actor";
 import { requirePerson } from "../access/authorize";
-import { moveStage } from "../sets";
+import { moveStage } from "../course";
 import { write } from "../write";
 import { sendBackSetInput } from "./inputs";
 import { requireAsSeen } from "./require-as-seen";
