@@ -130,7 +130,7 @@ const rules: [RegExp, z.ZodType][] = [
   [new RegExp(`^load\\.${uuid}$`), decimal({ label: "Load", low: 1, high: 48, decimals: 0 })],
   [new RegExp(`^reading\\.${uuid}\\.${column}\\.(?:[1-9]|1\\d|20)$`), amountSchema],
   [
-    new RegExp(`^acknowledged\\.[a-z-]{1,60}/(?:${uuid}|set)/(?:[\\d.]{1,12}|open|all)$`),
+    new RegExp(`^acknowledged\\.[a-z0-9-]{1,80}/(?:${uuid}|set)/(?:[\\d.]{1,12}|open|all)$`),
     optionalText({ label: "Recorded as read", longest: 2000 }),
   ],
 ];

@@ -12,7 +12,7 @@ const typedText = z
   .refine((text) => !unstorable.test(text), "A control character cannot be stored.");
 
 const draftChange = z.strictObject({
-  field: z.string().max(120).refine(isDraftField, "The sheet has no such field."),
+  field: z.string().max(160).refine(isDraftField, "The sheet has no such field."),
   /** What stood there when it was changed. */
   base: typedText,
   value: typedText,

@@ -1,7 +1,7 @@
 import "server-only";
 import type { Phase } from "../../db/vocabulary";
 import { judgeSet } from "../../metrology/cycle/judge-set";
-import type { CycleFigures, CycleFigures } from "../../metrology/cycle/types";
+import type { CycleFigures } from "../../metrology/cycle/types";
 import { decide, type Verdict } from "../../metrology/uncertainty/decide";
 import { evaluateRevision } from "./evaluate-revision";
 import type { Placed } from "./get-set-results";

@@ -157,6 +157,8 @@ export type Finding = {
   kind: string;
   /** Null where the whole column or set is in doubt. */
   setInjectorId: string | null;
+  /** The other one of two that look exchanged. */
+  otherSetInjectorId?: string;
   /** As set; null where no single width is in doubt. */
   pulseWidthMs: number | null;
   sentence: string;

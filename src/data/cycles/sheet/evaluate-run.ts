@@ -25,7 +25,7 @@ export function evaluateRun(run: Run, judging: Judging): { figures: CycleFigures
     model,
     ...(earlier ? { earlier } : {}),
   });
-  const findings = doubts.map((doubt) => describeDoubt(doubt, asSet, tagOf));
+  const findings = doubts.map((doubt) => describeDoubt(doubt, { asSet, tagOf }));
   return { figures: nameAsSet(figures, asSet), findings: [...plainFindings(run, tagOf), ...findings] };
 }
 

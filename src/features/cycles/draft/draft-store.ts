@@ -1,4 +1,5 @@
 import type { DraftFields } from "../../../data/cycles/draft-fields";
+import { newKey } from "../../../ui/form/new-key";
 import {
   chooseText,
   type DraftState,
@@ -13,7 +14,6 @@ import {
   typeInto,
 } from "./draft-state";
 import { keepText, keptTexts, letGo } from "./kept-texts";
-import { newKey } from "./new-key";
 import { type SendResult, sendBatch } from "./send-batch";
 
 export type SaveStatus = "saved" | "waiting" | "saving" | "unreachable" | "sign in" | "closed" | "refused";

@@ -103,5 +103,5 @@ export function copyBlock(model: GridModel, fields: DraftFields, range: Range): 
     const field = fieldAt(rows[row]!, model.columns[column]!);
     lines.set(row, [...(lines.get(row) ?? []), field ? (fields[field] ?? "") : ""]);
   }
-  return [...lines.values()].map((cells) => cells.join("\t")).join("\n");
+  return [...lines.values()].map((cells) => `${cells.join("\t")}\n`).join("");
 }
