@@ -9,6 +9,7 @@ export { getBagLabels } from "./get-bag-labels";
 export { getSet } from "./get-set";
 export { handOverSet } from "./hand-over-set";
 export { holdSet } from "./hold-set";
+export { setsWithin } from "./internal";
 export { listSets } from "./list-sets";
 export { rejectInjector } from "./reject-injector";
 export { replaceInjector } from "./replace-injector";
