@@ -1,8 +1,14 @@
 import "server-only";
 
+export type {
+  CertificateContent,
+  CertifiedCalibration,
+  CertifiedChecks,
+  CertifiedInjector,
+  CertifiedPhase,
+} from "../../documents/certificate/content";
 export { releaseMeaning } from "./content/build-content";
-export { certifyInjectors } from "./content/certify-injectors";
-export { certifyPhase } from "./content/certify-phase";
+export { type PresentedResults, presentResults } from "./content/present-results";
 export { type CertificateDetail, type CertificateRevision, getCertificate } from "./get-certificate";
 export { getCertificateFile } from "./get-certificate-file";
 export { getDataSheet } from "./get-data-sheet";

@@ -4,6 +4,7 @@ import { version as programVersion } from "../../../package.json";
 import type { Transaction } from "../../db/client";
 import { blobs } from "../../db/schema/blobs";
 import { certificates } from "../../db/schema/certificates";
+import { fingerprintContent } from "../../documents/certificate/fingerprint";
 import { renderCertificate } from "../../documents/certificate/render-certificate";
 import { buildContent, type Issue } from "./content/build-content";
 import { loadBasis } from "./load-basis";
@@ -29,7 +30,7 @@ export async function issueCertificate(
     ...results.asFound.latest.calibrations,
     ...results.asLeft.latest.calibrations,
   ]);
-  const basis = await loadBasis(transaction, set);
+  const basis = await loadBasis(transaction, { setId: set.setId, customerId: set.customer.customerId });
   const issue = { ...wanted, verificationCode: makeVerificationCode(), programVersion };
   const content = buildContent(reviewed, basis, issue);
   const bytes = await renderCertificate(
@@ -53,7 +54,7 @@ export async function issueCertificate(
       asLeftRevisionId: results.asLeft.latest.cycleRevisionId,
       toleranceClassRevisionId: results.toleranceClass.toleranceClassRevisionId,
       content,
-      contentSha256: sha256(JSON.stringify(content)),
+      contentSha256: fingerprintContent(content),
       pdfSha256,
       verificationCode: issue.verificationCode,
       programVersion,
@@ -63,6 +64,6 @@ export async function issueCertificate(
   return { certificateId: stored!.certificateId, number: issue.number, pdfSha256 };
 }
 
-function sha256(data: string | Uint8Array): string {
+function sha256(data: Uint8Array): string {
   return createHash("sha256").update(data).digest("hex");
 }

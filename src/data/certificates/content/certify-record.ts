@@ -7,23 +7,19 @@ import type { CleaningRun } from "../../cycles/results";
 import type { SetDetail } from "../../sets";
 import type { CertificateBasis } from "../load-basis";
 import type { Reviewed } from "../require-as-seen";
-import { certifyInjectors } from "./certify-injectors";
-import { certifyPhase } from "./certify-phase";
+import { presentResults } from "./present-results";
 
 /** What stands in the record, whoever releases it and when. */
 export function certifyRecord({ set, results }: Reviewed, basis: CertificateBasis) {
-  const asLeft = certifyPhase(results.asLeft);
+  const presented = presentResults(set, results);
   return {
-    lab: labIdentity(basis.lab, asLeft.bench.location),
+    ...presented,
+    asFound: presented.asFound!,
+    asLeft: presented.asLeft!,
+    lab: labIdentity(basis.lab, results.asLeft.latest.bench.location),
     customer: basis.customer,
     suppliedByCustomer: suppliedByCustomer(set),
     set: { number: set.number, workAsked: set.workAsked, receivedAt: set.checkedInAt.toISOString() },
-    model: certifyModel(set.model),
-    injectors: certifyInjectors(set.injectors),
-    reference: results.reference,
-    toleranceClass: certifyClass(results),
-    asFound: certifyPhase(results.asFound),
-    asLeft,
     cleaningRuns: results.cleaningRuns.map(certifyCleaning),
     photos: basis.sprayPhotos.map(({ sha256, setInjectorId, phase, takenAt }) => ({
       sha256,
@@ -51,15 +47,6 @@ function suppliedByCustomer({
     { label: "Request", text: customerRequest },
     { label: "Markings", text: markings.join(", ") },
   ].filter(({ text }) => text !== "");
-}
-
-function certifyModel({ modelId: _id, confirmed: _confirmed, ...model }: SetDetail["model"]) {
-  return model;
-}
-
-function certifyClass({ toleranceClass, leakageLimitMm3PerMin }: Reviewed["results"]) {
-  const { toleranceClassId: _id, toleranceClassRevisionId: _revisionId, ...judged } = toleranceClass;
-  return { ...judged, leakageLimitMm3PerMin };
 }
 
 function certifyCleaning(run: CleaningRun): CertifiedCleaning {

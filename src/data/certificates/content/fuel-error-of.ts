@@ -1,18 +1,34 @@
 import type { FuelError } from "../../../documents/certificate/content";
-import { fuelErrorCurve } from "../../../metrology";
 import type { CycleFigures } from "../../../metrology/cycle/types";
+import { fuelErrorCurve } from "../../../metrology/line/fuel-error-curve";
 
 const steps = 48;
 
-/** Over the measured widths only, closer together where the pulses are short and the error grows. */
+/** Over the measured widths only, closer together where pulses are short and the error grows. */
 export function fuelErrorOf(figures: CycleFigures): FuelError {
   const withLine = figures.injectors.flatMap(({ injectorId, flowLine }) =>
     flowLine ? [{ injectorId, flowLine }] : [],
   );
-  const measured = figures.injectors.flatMap((injector) => injector.flows.map((flow) => flow.pulseWidthMs));
   if (withLine.length < 2) return { pulseWidthsMs: [], injectors: [] };
-  const longestDeadTime = Math.max(...withLine.map(({ flowLine }) => flowLine.deadTimeMs));
-  const from = Math.min(...measured.filter((width) => width > longestDeadTime));
-  const pulseWidthsMs = geometricSteps(from, Math.max(...measured));
-  return { pulseWidthsMs, injectors: curves(withLine, pulseWidthsMs) };
+  const lines = withLine.map(({ flowLine }) => flowLine);
+  const pulseWidthsMs = stepsOver(figures, Math.max(...lines.map((line) => line.deadTimeMs)));
+  const curve = fuelErrorCurve(lines, pulseWidthsMs);
+  return {
+    pulseWidthsMs,
+    injectors: withLine.map(({ injectorId }, index) => ({
+      injectorId,
+      errorPercent: curve.map(({ errorsPercent }) => errorsPercent[index]!),
+    })),
+  };
+}
+
+/** From the shortest measured width at which every injector opens to the longest, in equal ratios. */
+function stepsOver(figures: CycleFigures, longestDeadTimeMs: number): number[] {
+  const measured = figures.injectors.flatMap((injector) => injector.flows.map((flow) => flow.pulseWidthMs));
+  const to = Math.max(...measured);
+  const from = Math.min(to, ...measured.filter((width) => width > longestDeadTimeMs));
+  if (from === to) return [to];
+  return Array.from({ length: steps + 1 }, (_, index) =>
+    index === steps ? to : from * (to / from) ** (index / steps),
+  );
 }
