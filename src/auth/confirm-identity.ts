@@ -4,24 +4,16 @@ import type { Context } from "../data/access/actor";
 import { requirePerson } from "../data/access/authorize";
 import { recordEvent } from "../data/audit/record-event";
 import { database } from "../db/client";
-import { people, sessions } from "../db/schema/people";
-import { passwordMatches } from "./password";
-import { countWrongTry, secondsToWait } from "./throttle";
+import { sessions } from "../db/schema/people";
+import { checkOwnPassword } from "./check-own-password";
 
 type Answer = "confirmed" | "wrong" | { waitSeconds: number };
 
 /** The password once more, before a step such as release. */
 export async function confirmIdentity(context: Context, password: string, peer: string): Promise<Answer> {
   const { personId, sessionId } = requirePerson(context);
-  const [person] = await database().select().from(people).where(eq(people.id, personId));
-  const guesser = { account: person?.emailCanonical ?? personId, peer };
-  const waitSeconds = await secondsToWait(guesser);
-  if (waitSeconds > 0) return { waitSeconds };
-  if (!person?.passwordHash || !(await passwordMatches(person.passwordHash, password))) {
-    await countWrongTry(guesser);
-    await recordEvent(database(), context, { event: "sign-in failed", noun: "sign-in" });
-    return "wrong";
-  }
+  const answer = await checkOwnPassword(context, password, peer);
+  if (answer !== "right") return answer;
   await database().transaction(async (transaction) => {
     await transaction.update(sessions).set({ authenticatedAt: sql`now()` }).where(eq(sessions.id, sessionId));
     await recordEvent(transaction, context, {

@@ -4,12 +4,15 @@ import { hash, verify } from "@node-rs/argon2";
 /** OWASP's floor for argon2id; the work runs on a thread of its own, off the event loop. */
 const cost = { memoryCost: 19_456, timeCost: 2, parallelism: 1 };
 
+/** One form for an é that one keyboard sends whole and another in two parts (NIST SP 800-63B-4, 3.1.1.2). */
+const asTyped = (password: string) => password.normalize("NFC");
+
 export function hashPassword(password: string): Promise<string> {
-  return hash(password, cost);
+  return hash(asTyped(password), cost);
 }
 
 export function passwordMatches(storedHash: string, password: string): Promise<boolean> {
-  return verify(storedHash, password);
+  return verify(storedHash, asTyped(password));
 }
 
 let decoy: Promise<string> | undefined;
