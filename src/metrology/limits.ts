@@ -15,11 +15,11 @@ export function requireNumber(name: string, value: number, limits: Limits = {}):
     value <= upTo &&
     (above === undefined || value > above) &&
     (below === undefined || value < below);
-  if (!within) throw new RangeError(`${name} must be a number ${describe(limits)}: ${value} was given`);
+  if (!within) throw new RangeError(`${name} must be a number ${nameLimits(limits)}: ${value} was given`);
   return value;
 }
 
-function describe({ above, from, below, upTo }: Limits): string {
+function nameLimits({ above, from, below, upTo }: Limits): string {
   const low = above === undefined ? `from ${from ?? -largest}` : `above ${above}`;
   const high = below === undefined ? `up to ${upTo ?? largest}` : `below ${below}`;
   return `${low} and ${high}`;

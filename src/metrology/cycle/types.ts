@@ -128,4 +128,9 @@ export type SetCriterion = {
   verdict: Verdict | null;
 };
 
+/** One injector's winding at 20 °C. */
+export type MeasuredResistance = { injectorId: string; ohmsAt20C: number; expandedUncertainty: number };
+/** One injector's seat leakage; without an uncertainty it is judged as it stands. */
+export type MeasuredLeakage = { injectorId: string; mm3PerMin: number; expandedUncertainty?: number };
+
 export type SetVerdict = { criteria: SetCriterion[]; verdict: Verdict | null; decisionRule: string };

@@ -1,6 +1,6 @@
-import { type Columns, readPoints } from "./read-points";
 import { asPoint, type FlowPoint } from "./fit-flow-line";
 import { fitLine } from "./fit-line";
+import { type Columns, readPoints } from "./read-points";
 
 type Rule = { maxDeviationPercent: number; minWidths: number };
 /** Indices of distinct widths, both included. */

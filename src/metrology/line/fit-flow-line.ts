@@ -1,6 +1,6 @@
 import { requireFinite, requireNumber, requireProbability } from "../limits";
-import { fitLine, type LineFit } from "./fit-line";
 import { findLinearRange } from "./find-linear-range";
+import { fitLine, type LineFit } from "./fit-line";
 import { xIntercept } from "./x-intercept";
 
 /** `u`: standard uncertainty of the volume per pulse, given for all points or for none. */
@@ -45,7 +45,8 @@ export function fitFlowLine(
   requireNumber("minWidths", minWidths, { from: 2 });
   requireProbability("confidence", confidence);
   const range = findLinearRange(points.map(checked), { maxDeviationPercent, minWidths });
-  const isInside = ({ pulseWidthMs }: FlowPoint) => pulseWidthMs >= range.fromMs && pulseWidthMs <= range.toMs;
+  const isInside = ({ pulseWidthMs }: FlowPoint) =>
+    pulseWidthMs >= range.fromMs && pulseWidthMs <= range.toMs;
   const line = fitLine(points.filter(isInside).map(asPoint));
   const crossing = xIntercept(line, confidence);
   return {

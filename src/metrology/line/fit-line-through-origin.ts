@@ -1,6 +1,6 @@
 import { requireFinite } from "../limits";
 import { explained, type LineFit } from "./fit-line";
-import { readPoints, type Point } from "./read-points";
+import { type Point, readPoints } from "./read-points";
 import { sumOf } from "./sum-of";
 
 /**

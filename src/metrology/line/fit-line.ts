@@ -66,8 +66,7 @@ type Scatter = {
 };
 
 function errorTerms({ squares, sxx, weight, centreX, unit, degreesOfFreedom }: Scatter) {
-  if (degreesOfFreedom === 0)
-    return { slopeSe: null, interceptSe: null, covariance: null, residualSd: null };
+  if (degreesOfFreedom === 0) return { slopeSe: null, interceptSe: null, covariance: null, residualSd: null };
   const scatter = Math.sqrt(squares / degreesOfFreedom);
   const sd = unit ?? scatter;
   const slopeSe = sd / Math.sqrt(sxx);

@@ -10,7 +10,13 @@ export function monotoneCubic(xs: readonly number[], ys: readonly number[]): (x:
   const secants = xs.slice(1).map((x, k) => (ys[k + 1]! - ys[k]!) / (x - xs[k]!));
   const slopes = drawnIn(parabolaSlopes(xs, secants), secants);
   return (x) => {
-    const k = Math.max(0, Math.min(xs.length - 2, xs.findLastIndex((node) => node <= x)));
+    const k = Math.max(
+      0,
+      Math.min(
+        xs.length - 2,
+        xs.findLastIndex((node) => node <= x),
+      ),
+    );
     const width = xs[k + 1]! - xs[k]!;
     const s = (x - xs[k]!) / width;
     const t = 1 - s;

@@ -21,10 +21,12 @@ export function decide(
 ): Verdict {
   requireNumber("value", value);
   requireNumber("expandedUncertainty", expandedUncertainty, { from: 0 });
-  if (low === undefined && high === undefined) throw new RangeError("limits must hold low or high: none was given");
+  if (low === undefined && high === undefined)
+    throw new RangeError("limits must hold low or high: none was given");
   if (low !== undefined) requireNumber("low", low);
   if (high !== undefined) requireNumber("high", high, { from: low });
-  const slack = 1e-12 * Math.max(Math.abs(value), Math.abs(low ?? 0), Math.abs(high ?? 0), expandedUncertainty);
+  const slack =
+    1e-12 * Math.max(Math.abs(value), Math.abs(low ?? 0), Math.abs(high ?? 0), expandedUncertainty);
   const inside = Math.min(
     low === undefined ? Number.POSITIVE_INFINITY : value - low,
     high === undefined ? Number.POSITIVE_INFINITY : high - value,
