@@ -6,6 +6,7 @@ import { cycleDrafts, readingFiles } from "../../db/schema/cycles";
 import type { Context } from "../access/actor";
 import { requirePerson } from "../access/authorize";
 import { invalid } from "../access/errors";
+import { fileLabel } from "../received-bytes";
 import { write } from "../write";
 import { lockOpenDraft, requireSameDraft } from "./lock-open-draft";
 import { addReadingFileInput, changesOnSheet } from "./preview-reading-file";
@@ -32,7 +33,13 @@ export function addReadingFile(context: Context, raw: unknown) {
         .onConflictDoNothing();
       const [file] = await transaction
         .insert(readingFiles)
-        .values({ draftId: draft.id, sha256, name: labelOf(input.name), rows, sentBy: personId })
+        .values({
+          draftId: draft.id,
+          sha256,
+          name: fileLabel(input.name, "readings.csv"),
+          rows,
+          sentBy: personId,
+        })
         .returning({ id: readingFiles.id });
       const { fields } = mergeChanges(draft.fields, changes);
       await transaction
@@ -49,13 +56,4 @@ export function addReadingFile(context: Context, raw: unknown) {
       return { readingFileId: file!.id, version: draft.version + 1 };
     },
   );
-}
-
-/** A client's file name is a label only. */
-function labelOf(name: string): string {
-  const label = name
-    .normalize("NFC")
-    .replace(/[\p{Cc}\p{Cf}\p{Cs}/\\]/gu, "")
-    .trim();
-  return [...label].slice(0, 200).join("") || "readings.csv";
 }

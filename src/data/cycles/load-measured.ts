@@ -6,6 +6,7 @@ import { cycleInjectors } from "../../db/schema/cycles";
 import { setInjectors } from "../../db/schema/injectors";
 import { instruments } from "../../db/schema/instruments";
 import { injectorChecks, readings } from "../../db/schema/readings";
+import { groupBy } from "../group-by";
 import type { InjectorChecks, RecordedInjector, RecordedReading } from "./results";
 
 /** Per revision: its injectors by place, each with channel, readings and checks. */
@@ -17,19 +18,19 @@ export async function loadMeasured(
     selectPlaced(connection, revisionIds),
     selectReadings(connection, revisionIds),
   ]);
-  const readingsOf = new Map<string, RecordedReading[]>();
-  for (const { revisionId, setInjectorId, ...reading } of read) {
-    const key = `${revisionId}/${setInjectorId}`;
-    readingsOf.set(key, [...(readingsOf.get(key) ?? []), reading]);
-  }
+  const readingsOf = groupBy(read, (reading) => `${reading.revisionId}/${reading.setInjectorId}`);
   const measured = new Map<string, RecordedInjector[]>(revisionIds.map((id) => [id, []]));
   for (const { revisionId, checks, ...injector } of placed)
     measured.get(revisionId)?.push({
       ...injector,
-      readings: readingsOf.get(`${revisionId}/${injector.setInjectorId}`) ?? [],
+      readings: (readingsOf.get(`${revisionId}/${injector.setInjectorId}`) ?? []).map(asReading),
       checks: checks ?? nothingChecked,
     });
   return measured;
+}
+
+function asReading({ revisionId: _in, setInjectorId: _of, ...reading }: ReadingRow): RecordedReading {
+  return reading;
 }
 
 const nothingChecked: InjectorChecks = {
@@ -78,6 +79,8 @@ function selectPlaced(connection: Connection, revisionIds: string[]) {
     .where(inArray(cycleInjectors.revisionId, revisionIds))
     .orderBy(asc(setInjectors.position), asc(setInjectors.tag));
 }
+
+type ReadingRow = Awaited<ReturnType<typeof selectReadings>>[number];
 
 function selectReadings(connection: Connection, revisionIds: string[]) {
   return connection

@@ -1,5 +1,4 @@
 import "server-only";
-import { createHash } from "node:crypto";
 import { eq } from "drizzle-orm";
 import { z } from "zod";
 import type { Connection } from "../../db/client";
@@ -9,6 +8,7 @@ import { notFound } from "../access/errors";
 import { baseVersion, id, writeInput } from "../fields";
 import { read } from "../read";
 import { mostProblems } from "../read-csv";
+import { receivedBytes } from "../received-bytes";
 import { injectorsOfDraft } from "./injectors-of-draft";
 import { type ReadingFileFormat, readingFileFormat } from "./inputs";
 import { loadBenches } from "./load-benches";
@@ -16,17 +16,11 @@ import type { OpenDraft } from "./lock-open-draft";
 import { readReadingFile } from "./read-reading-file";
 import { changesOfFile } from "./sheet/changes-of-file";
 
-/** Stands for its bytes wherever an input is written down or compared. */
-const receivedBytes = z.instanceof(Uint8Array).transform((bytes) => {
-  const sha256 = createHash("sha256").update(bytes).digest("hex");
-  return { bytes, sha256, toJSON: () => sha256 };
-});
-
 const fileFields = {
   draftId: id("draft"),
   name: z.string().max(2000),
   format: readingFileFormat,
-  file: receivedBytes,
+  file: receivedBytes("Please choose a file of readings."),
 };
 const previewReadingFileInput = z.object(fileFields);
 /** `version` is the draft's as the preview showed it. */

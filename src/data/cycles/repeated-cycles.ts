@@ -1,12 +1,11 @@
 import "server-only";
+import { groupBy } from "../group-by";
 import type { LoadedRevision } from "./load-revisions";
 import type { EarlierCycle } from "./results";
 
 /** Cycles that a later one of the same phase has taken the place of, oldest first. */
 export function repeatedCyclesOf(revisions: LoadedRevision[]): EarlierCycle[] {
-  const byCycle = new Map<string, LoadedRevision[]>();
-  for (const revision of revisions)
-    byCycle.set(revision.cycle.cycleId, [...(byCycle.get(revision.cycle.cycleId) ?? []), revision]);
+  const byCycle = groupBy(revisions, (revision) => revision.cycle.cycleId);
   const cycles = [...byCycle.values()].map((ofCycle) => ({
     ...ofCycle[0]!.cycle,
     revisions: ofCycle.map(withoutCycle).reverse(),
