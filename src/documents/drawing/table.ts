@@ -4,60 +4,54 @@ import { line } from "./lines";
 import { drawMark } from "./marks";
 import type { Pen } from "./pen";
 import { colours, leadingOf, styles } from "./print-style";
-import { markRoom, type PlacedColumn, placeColumns } from "./table-columns";
+import { markRoom, type PlacedColumn, placeColumns, type Setting, scaled } from "./table-columns";
 import type { CellLine, Column, Row, TableSpec } from "./table-spec";
 import { baselineOf } from "./text-blocks";
 
 const padding = 3.2;
+export const usualSetting: Setting = { scale: 1, gap: 8 };
+
+type Place = { column: Column; placed: PlacedColumn };
 
 /** A head to repeat on every page, and rows that stay whole. */
-export function table(pen: Pen, spec: TableSpec, width: number): { head: Block; rows: Block[] } {
-  const placed = placeColumns(pen, spec, width);
+export function table(
+  pen: Pen,
+  spec: TableSpec,
+  width: number,
+  setting: Setting = usualSetting,
+): { head: Block; rows: Block[] } {
+  const columns = placeColumns(pen, spec, width, setting);
+  const places = spec.columns.map((column, index) => ({ column, placed: columns[index]! }));
   return {
-    head: headBlock(pen, spec.columns, placed, width),
-    rows: spec.rows.map((row) => rowBlock(pen, spec.columns, placed, row, width)),
+    head: headBlock(pen, places, width, setting),
+    rows: spec.rows.map((row) => rowBlock(pen, places, row, width, setting)),
   };
 }
 
-function headBlock(
-  pen: Pen,
-  columns: readonly Column[],
-  placed: readonly PlacedColumn[],
-  width: number,
-): Block {
-  const leading = leadingOf(styles.key);
-  const lines = Math.max(...columns.map(({ title }) => title.length));
-  const height = lines * leading + padding + 1;
+function headBlock(pen: Pen, places: readonly Place[], width: number, setting: Setting): Block {
+  const style = scaled(styles.key, setting);
+  const leading = leadingOf(style);
+  const lines = Math.max(...places.map(({ column }) => column.title.length));
+  const height = lines * leading + padding;
   return {
     height,
     draw(x, y) {
-      for (const [index, { title, align }] of columns.entries())
-        for (const [place, text] of title.entries()) {
-          const top = y + (lines - title.length + place) * leading;
-          writeAligned(
-            pen,
-            { text, style: styles.key },
-            placed[index]!,
-            align,
-            x,
-            baselineOf(top, styles.key),
-          );
+      for (const place of places)
+        for (const [index, text] of place.column.title.entries()) {
+          const top = y + (lines - place.column.title.length + index) * leading;
+          writeAligned(pen, { text, style }, place, x, baselineOf(top, style));
         }
       line(pen, [x, y + height], [x + width, y + height], { colour: colours.ink2, width: 0.6 });
     },
   };
 }
 
-function rowBlock(
-  pen: Pen,
-  columns: readonly Column[],
-  placed: readonly PlacedColumn[],
-  row: Row,
-  width: number,
-): Block {
-  const cells = row.cells.map((cell, index) =>
-    columns[index]!.flex ? cell.flatMap((one) => wrapLine(pen, one, placed[index]!.width)) : cell,
-  );
+function rowBlock(pen: Pen, places: readonly Place[], row: Row, width: number, setting: Setting): Block {
+  const cells = row.cells.map((cell, index) => {
+    const lines = cell.map((one) => ({ ...one, style: scaled(one.style, setting) }));
+    const { column, placed } = places[index]!;
+    return column.flex ? lines.flatMap((one) => wrapLine(pen, one, placed.width)) : lines;
+  });
   const height = Math.max(...cells.map(heightOf)) + 2 * padding;
   return {
     height,
@@ -66,8 +60,7 @@ function rowBlock(
       for (const [index, cell] of cells.entries()) {
         let top = y + (height - heightOf(cell)) / 2;
         for (const one of cell) {
-          const { align } = columns[index]!;
-          writeAligned(pen, one, placed[index]!, align, x, baselineOf(top, one.style));
+          writeAligned(pen, one, places[index]!, x, baselineOf(top, one.style));
           top += leadingOf(one.style);
         }
       }
@@ -86,15 +79,9 @@ function wrapLine(pen: Pen, one: CellLine, width: number): CellLine[] {
   return lines.map((text, index) => ({ text, style: one.style, mark: index === 0 ? one.mark : undefined }));
 }
 
-function writeAligned(
-  pen: Pen,
-  one: CellLine,
-  column: PlacedColumn,
-  align: "left" | "right",
-  x: number,
-  baseline: number,
-): void {
-  const edge = x + column.x + (align === "right" ? column.width : 0);
+function writeAligned(pen: Pen, one: CellLine, { column, placed }: Place, x: number, baseline: number): void {
+  const { align } = column;
+  const edge = x + placed.x + (align === "right" ? placed.width : 0);
   const room = markRoom(one);
   if (one.mark) {
     const from = align === "right" ? edge - pen.measure(one.text, one.style) - room : edge;
