@@ -169,6 +169,7 @@ export const verbs = {
   listToday: { row: 7 },
   findSet: { row: 7 },
   getSet: { row: 7 },
+  getLabCard: { row: 7 },
   findKnownInjectors: { row: 6 },
   editIntake: { row: 8, writes: true },
   handOverSet: { row: 9, writes: true },
