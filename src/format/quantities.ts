@@ -28,7 +28,7 @@ export const quantities = {
   voltage: { unit: "V", decimals: 2 },
   leakage: { unit: "mm³/min", decimals: 1 },
   density: { unit: "g/mL", decimals: 4 },
-  collectedVolume: { unit: "mL", decimals: 3 },
+  collectedVolume: { unit: "mL", decimals: 2 },
   collectedMass: { unit: "g", decimals: 3 },
   gain: { unit: "", decimals: 5 },
   coverageFactor: { unit: "", decimals: 2 },

@@ -48,14 +48,20 @@ export type RailStripInput = {
 };
 
 const shortestBar = 1.5;
+/** Where a bar is cut its length is written at its end. */
+const lengthRoom = 12;
+/** A pair of bars is drawn as wide as those of a set of six, not as two walls. */
+const fewest = 6;
 
 /** Where everything of a rail strip stands; the page and the certificate both draw from this. */
 export function railStrip(input: RailStripInput): RailStripPicture {
   const { found = [], left = [], halfLimitPercent, width, height, railHeight = 4, showLabels = true } = input;
   const count = Math.max(found.length, left.length, input.labels?.length ?? 0);
   const halfScalePercent = railStripHalfScale(found, left, halfLimitPercent);
-  const top = railHeight + Math.min(10, height * 0.06);
-  const bottom = height - (showLabels ? 18 : 1);
+  const cut = [...found, ...left].some((percent) => Math.abs(percent ?? 0) > halfScalePercent);
+  const room = showLabels && cut ? lengthRoom : 0;
+  const top = railHeight + Math.min(10, height * 0.06) + room;
+  const bottom = height - (showLabels ? 18 : 1) - room;
   const meanY = (top + bottom) / 2;
   const perPercent = (bottom - top) / 2 / halfScalePercent;
   const pitch = count > 0 ? width / count : width;
@@ -66,7 +72,7 @@ export function railStrip(input: RailStripInput): RailStripPicture {
     const barHeight = Math.max(Math.abs(shown) * perPercent, shortestBar);
     const centred = Math.abs(shown) * perPercent < shortestBar;
     const y = centred ? meanY - shortestBar / 2 : shown > 0 ? meanY - barHeight : meanY;
-    const barWidth = Math.min(pitch * share, 52 * share * 2);
+    const barWidth = Math.min(pitch, width / fewest) * share;
     return {
       x: x - barWidth / 2,
       y,

@@ -1,0 +1,35 @@
+type Props = {
+  caption: string;
+  rowHead: string;
+  columns: readonly string[];
+  rows: readonly { key: string; head: string; cells: readonly string[] }[];
+};
+
+/** The figures behind a chart, for those who do not see it. */
+export function SeriesTable({ caption, rowHead, columns, rows }: Props) {
+  return (
+    <table className="sr-only">
+      <caption>{caption}</caption>
+      <thead>
+        <tr>
+          <th scope="col">{rowHead}</th>
+          {columns.map((column) => (
+            <th key={column} scope="col">
+              {column}
+            </th>
+          ))}
+        </tr>
+      </thead>
+      <tbody>
+        {rows.map(({ key, head, cells }) => (
+          <tr key={key}>
+            <th scope="row">{head}</th>
+            {cells.map((cell, index) => (
+              <td key={columns[index]}>{cell}</td>
+            ))}
+          </tr>
+        ))}
+      </tbody>
+    </table>
+  );
+}
