@@ -11,6 +11,8 @@ export const stages = [
   "handed over",
   "returned uncleaned",
 ] as const;
+/** Stages in which a set is worked on; from certified on its record is frozen. */
+export const openStages = ["checked in", "as found", "cleaning", "as left", "in review"] as const;
 export const phases = ["as found", "as left"] as const;
 export const staffRoles = ["counter", "technician", "manager"] as const;
 export const roles = [...staffRoles, "customer"] as const;
@@ -46,10 +48,14 @@ export const certificateStates = ["current", "superseded", "revoked"] as const;
 export const paperSizes = ["A4", "Letter"] as const;
 
 export type Stage = (typeof stages)[number];
+export function isOpenStage(stage: Stage): boolean {
+  return (openStages as readonly Stage[]).includes(stage);
+}
 export type Phase = (typeof phases)[number];
 export type StaffRole = (typeof staffRoles)[number];
 export type Role = (typeof roles)[number];
 export type Collection = (typeof collections)[number];
 export type InstrumentKind = (typeof instrumentKinds)[number];
+export type CalibrationEnd = (typeof calibrationEnds)[number];
 export type CertificateState = (typeof certificateStates)[number];
 export type PaperSize = (typeof paperSizes)[number];

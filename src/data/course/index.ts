@@ -3,4 +3,3 @@ import "server-only";
 export { type LockedSet, lockSet } from "./lock-set";
 export { beginCourse, moveStage } from "./move-stage";
 export { requireOpenSet, requireOpenStage } from "./require-open-set";
-export { isOpenStage, openStages } from "./stages";

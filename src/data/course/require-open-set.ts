@@ -1,8 +1,8 @@
 import "server-only";
 import type { Transaction } from "../../db/client";
+import { isOpenStage } from "../../db/vocabulary";
 import { refused } from "../access/errors";
 import { type LockedSet, lockSet } from "./lock-set";
-import { isOpenStage } from "./stages";
 
 /** Refuses a set that is certified, returned or handed over; holds do not matter. */
 export function requireOpenStage(set: LockedSet): void {

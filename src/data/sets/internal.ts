@@ -2,8 +2,8 @@ import "server-only";
 import { inArray, type SQL, sql } from "drizzle-orm";
 import { labDetails } from "../../db/schema/lab";
 import { sets } from "../../db/schema/sets";
+import { openStages } from "../../db/vocabulary";
 import type { Grant } from "../access/authorize";
-import { openStages } from "../course";
 
 /** The sets that the actor reaches: all, or those of the customers acted for. */
 export function setsWithin(grant: Grant): SQL | undefined {
