@@ -1,6 +1,6 @@
 import { z } from "zod";
 import { certificateStates, paperSizes } from "../../db/vocabulary";
-import { baseVersion, choice, id, optionalText, page, reason, writeInput } from "../fields";
+import { baseVersion, choice, id, optionalText, page, reason, searched, writeInput } from "../fields";
 
 /** The records that the page showed when its form was made: nothing unseen is approved. */
 const seen = z.string({ error: "The form does not say what was seen. Reload the page." }).min(1).max(8000);
@@ -27,14 +27,17 @@ export const reissueCertificateInput = writeInput({
 });
 export const revokeCertificateInput = writeInput({ certificateId: id("certificate"), reason: reason() });
 
-export const certificateSortKeys = ["issuedAt", "number", "set", "customer"] as const;
+export const certificateSorts = ["issuedAt", "number", "set", "customer"] as const;
 
 export const listCertificatesInput = page.extend({
   setId: z.uuid().optional().catch(undefined),
-  search: z.string().max(160).catch(""),
-  states: z.array(z.enum(certificateStates)).catch([]),
-  sort: z.enum(certificateSortKeys).catch("issuedAt"),
-  descending: z.boolean().catch(true),
+  state: z.enum(certificateStates).optional().catch(undefined),
+  search: searched(),
+  sort: z.enum(certificateSorts).catch("issuedAt"),
+  descending: z
+    .enum(["true", "false"])
+    .catch("true")
+    .transform((typed) => typed === "true"),
 });
 
 export const getCertificateInput = z.object({ certificateId: id("certificate") });

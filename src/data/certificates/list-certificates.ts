@@ -1,5 +1,5 @@
 import "server-only";
-import { and, asc, count, desc, eq, inArray, or, type SQL, sql } from "drizzle-orm";
+import { and, asc, count, desc, eq, or, type SQL, sql } from "drizzle-orm";
 import { certificates } from "../../db/schema/certificates";
 import { customers } from "../../db/schema/customers";
 import { injectorModels } from "../../db/schema/models";
@@ -8,6 +8,7 @@ import { sets } from "../../db/schema/sets";
 import type { CertificateState } from "../../db/vocabulary";
 import type { Context } from "../access/actor";
 import { containing } from "../containing";
+import { pageOf } from "../page-of";
 import { read } from "../read";
 import { listCertificatesInput } from "./inputs";
 import { reachableBy, replacedByNumber } from "./internal";
@@ -25,7 +26,6 @@ export type CertificateRow = {
   replacedBy: string | null;
 };
 
-const mostRows = 100;
 const sortColumns = {
   issuedAt: certificates.issuedAt,
   number: certificates.number,
@@ -41,10 +41,11 @@ export function listCertificates(context: Context, raw: unknown) {
     listCertificatesInput,
     raw,
     async ({ connection, input, grant }) => {
+      const { offset, limit } = pageOf(input);
       const where = and(
         reachableBy(grant),
         input.setId ? eq(certificates.setId, input.setId) : undefined,
-        input.states.length > 0 ? inArray(certificates.state, input.states) : undefined,
+        input.state ? eq(certificates.state, input.state) : undefined,
         matching(input.search),
       );
       const direction = input.descending ? desc : asc;
@@ -68,8 +69,8 @@ export function listCertificates(context: Context, raw: unknown) {
         .innerJoin(people, eq(people.id, certificates.releasedBy))
         .where(where)
         .orderBy(direction(sortColumns[input.sort]), direction(certificates.id))
-        .offset(input.startRow)
-        .limit(Math.min(mostRows, Math.max(1, input.endRow - input.startRow)));
+        .offset(offset)
+        .limit(limit);
       const [counted] = await connection
         .select({ total: count() })
         .from(certificates)
@@ -82,7 +83,7 @@ export function listCertificates(context: Context, raw: unknown) {
 }
 
 function matching(search: string): SQL | undefined {
-  if (search.trim() === "") return undefined;
+  if (search === "") return undefined;
   return or(
     containing(sql`lower(${certificates.number})`, search),
     containing(sql`lower(${sets.number})`, search),

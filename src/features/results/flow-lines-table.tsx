@@ -10,7 +10,7 @@ import { BeforeAfter } from "@/ui/layout/before-after";
 import { DataTable } from "@/ui/layout/data-table";
 import type { DataColumn } from "@/ui/layout/data-table-column";
 import { InjectorName } from "./injector-name";
-import { type PhaseResult, type ResultRow, resultRows } from "./result-rows";
+import { deadTimeOf, type PhaseResult, type ResultRow, resultRows } from "./result-rows";
 
 /** What the line of each injector says, with its intervals; as found small above, as left below. */
 export function FlowLinesTable({ results }: { results: PresentedResults }) {
@@ -57,11 +57,13 @@ const columns: DataColumn<ResultRow>[] = [
   figure(
     "dead time",
     ["Dead time", "ms"],
-    (result) => formatNumber(lineOf(result)?.deadTimeMs, "deadTime"),
+    (result) => formatNumber(deadTimeOf(result)?.value, "deadTime"),
     true,
   ),
   figure("interval", ["95 % interval", "ms"], intervalOf),
-  figure("se", ["Standard error", "ms"], (result) => formatNumber(lineOf(result)?.deadTimeSeMs, "deadTime")),
+  figure("se", ["Standard error", "ms"], (result) =>
+    formatNumber(deadTimeOf(result)?.standardError, "deadTime"),
+  ),
   figure("dof", ["Degrees", "of freedom"], (result) =>
     String(lineOf(result)?.line.degreesOfFreedom ?? noFigure),
   ),
@@ -70,7 +72,7 @@ const columns: DataColumn<ResultRow>[] = [
 ];
 
 function intervalOf(result: PhaseResult): string {
-  const interval = lineOf(result)?.deadTimeInterval;
+  const interval = deadTimeOf(result);
   return formatRange(interval?.low, interval?.high, "deadTime");
 }
 

@@ -4,6 +4,7 @@ import type {
   CertifiedPhase,
   PresentedResults,
 } from "@/data/certificates";
+import { niceCeiling } from "@/format/picture/nice-ticks";
 import type { InjectorFigures } from "@/metrology/cycle/types";
 
 /** One injector in one phase. */
@@ -61,4 +62,25 @@ export function widthsOf({ asFound, asLeft }: PresentedResults): number[] {
 
 export function flowAt(result: PhaseResult | null, pulseWidthMs: number): number | null {
   return result?.figures.flows.find((flow) => flow.pulseWidthMs === pulseWidthMs)?.volumePerPulseUl ?? null;
+}
+
+export type DeadTime = { value: number; low: number; high: number; standardError: number | null };
+
+/** A dead time whose interval cannot be had is not determined: nothing is shown for it. */
+export function deadTimeOf(result: PhaseResult | null): DeadTime | null {
+  const line = result?.figures.flowLine;
+  if (!line?.deadTimeInterval) return null;
+  return { value: line.deadTimeMs, ...line.deadTimeInterval, standardError: line.deadTimeSeMs };
+}
+
+/** Half of the spread that the class allows the static flow: what one injector may be off the mean, either way. */
+export function halfLimitOf({ toleranceClass }: PresentedResults): number | null {
+  const limit = toleranceClass.staticSpreadPercent;
+  return limit === null ? null : limit / 2;
+}
+
+/** A deviation scale that all rows share: the largest as left, and not below the limit. */
+export function deviationScale(results: PresentedResults): number {
+  const deviations = resultRows(results).map(({ found, left }) => (left ?? found)?.deviationPercent ?? 0);
+  return niceCeiling(Math.max(0.5, halfLimitOf(results) ?? 0, ...deviations.map(Math.abs)));
 }

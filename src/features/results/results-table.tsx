@@ -1,12 +1,21 @@
 import type { ReactNode } from "react";
 import type { PresentedResults } from "@/data/certificates";
-import { formatNumber } from "@/format/format-number";
+import { formatNumber, formatUncertainty } from "@/format/format-number";
 import { DeviationBar } from "@/ui/chart/deviation-bar";
 import { BeforeAfter } from "@/ui/layout/before-after";
 import { DataTable } from "@/ui/layout/data-table";
 import type { DataColumn } from "@/ui/layout/data-table-column";
 import { InjectorName } from "./injector-name";
-import { flowAt, type ResultRow, resultRows, widthsOf } from "./result-rows";
+import {
+  type DeadTime,
+  deadTimeOf,
+  deviationScale,
+  flowAt,
+  halfLimitOf,
+  type ResultRow,
+  resultRows,
+  widthsOf,
+} from "./result-rows";
 import { spreadFoot } from "./spread-foot";
 
 /** Every injector at every pulse width: as found small above, as left below, the spread in the last row. */
@@ -49,18 +58,27 @@ function columnsOf(results: PresentedResults): DataColumn<ResultRow>[] {
     staticColumn(foot.staticFlow),
     deadTimeColumn(foot.deadTime),
     windingColumn(foot.resistance),
-    {
-      key: "deviation",
-      head: "From mean",
-      unit: "static flow, %",
-      align: "center",
-      gap: true,
-      wideOnly: true,
-      cell: ({ found, left }) => (
-        <DeviationBar found={found?.deviationPercent} left={left?.deviationPercent} />
-      ),
-    },
+    deviationColumn(results),
   ];
+}
+
+function deviationColumn(results: PresentedResults): DataColumn<ResultRow> {
+  const scalePercent = deviationScale(results);
+  return {
+    key: "deviation",
+    head: "From mean",
+    unit: `−${scalePercent} % … +${scalePercent} %`,
+    align: "center",
+    gap: true,
+    wideOnly: true,
+    cell: ({ found, left }) => (
+      <DeviationBar
+        percent={(results.asLeft ? left : found)?.deviationPercent ?? null}
+        scalePercent={scalePercent}
+        halfLimitPercent={halfLimitOf(results)}
+      />
+    ),
+  };
 }
 
 function staticColumn(foot: ReactNode): DataColumn<ResultRow> {
@@ -89,8 +107,9 @@ function deadTimeColumn(foot: ReactNode): DataColumn<ResultRow> {
     gap: true,
     cell: ({ found, left }) => (
       <BeforeAfter
-        before={formatNumber(found?.figures.flowLine?.deadTimeMs, "deadTime")}
-        after={formatNumber(left?.figures.flowLine?.deadTimeMs, "deadTime")}
+        before={formatNumber(deadTimeOf(found)?.value, "deadTime")}
+        after={formatNumber(deadTimeOf(left)?.value, "deadTime")}
+        small={plusMinus(deadTimeOf(left))}
       />
     ),
     foot: (
@@ -100,6 +119,13 @@ function deadTimeColumn(foot: ReactNode): DataColumn<ResultRow> {
       </>
     ),
   };
+}
+
+/** The further end of the interval, which is hardly ever the same to both sides. */
+function plusMinus(deadTime: DeadTime | null): string | null {
+  if (!deadTime) return null;
+  const { value, low, high } = deadTime;
+  return `±${formatUncertainty(Math.max(high - value, value - low), "deadTime")}`;
 }
 
 function windingColumn(foot: ReactNode): DataColumn<ResultRow> {
