@@ -4,10 +4,13 @@ import { version as programVersion } from "../../../package.json";
 import type { Transaction } from "../../db/client";
 import { blobs } from "../../db/schema/blobs";
 import { certificates } from "../../db/schema/certificates";
+import type { CertificateContent } from "../../documents/certificate/content";
 import { fingerprintContent } from "../../documents/certificate/fingerprint";
 import { renderCertificate } from "../../documents/certificate/render-certificate";
+import { MissingGlyphError } from "../../documents/drawing/missing-glyph-error";
+import { refused } from "../access/errors";
 import { buildContent, type Issue } from "./content/build-content";
-import { loadBasis } from "./load-basis";
+import { type CertificateBasis, loadBasis } from "./load-basis";
 import { lockCalibrations } from "./lock-calibrations";
 import type { Reviewed } from "./require-as-seen";
 import { makeVerificationCode } from "./verification-code";
@@ -33,10 +36,7 @@ export async function issueCertificate(
   const basis = await loadBasis(transaction, { setId: set.setId, customerId: set.customer.customerId });
   const issue = { ...wanted, verificationCode: makeVerificationCode(), programVersion };
   const content = buildContent(reviewed, basis, issue);
-  const bytes = await renderCertificate(
-    content,
-    new Map(basis.sprayPhotos.map((photo) => [photo.sha256, photo.bytes])),
-  );
+  const bytes = await draw(content, basis);
   const pdfSha256 = sha256(bytes);
   await transaction
     .insert(blobs)
@@ -62,6 +62,16 @@ export async function issueCertificate(
     })
     .returning({ certificateId: certificates.id });
   return { certificateId: stored!.certificateId, number: issue.number, pdfSha256 };
+}
+
+async function draw(content: CertificateContent, { sprayPhotos }: CertificateBasis): Promise<Uint8Array> {
+  try {
+    return await renderCertificate(content, new Map(sprayPhotos.map(({ sha256, bytes }) => [sha256, bytes])));
+  } catch (error) {
+    if (error instanceof MissingGlyphError)
+      throw refused("The certificate holds a sign that cannot be printed.", [error.message]);
+    throw error;
+  }
 }
 
 function sha256(data: Uint8Array): string {

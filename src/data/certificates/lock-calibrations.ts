@@ -12,12 +12,14 @@ import type { UsedCalibration } from "../cycles/results";
 export async function lockCalibrations(transaction: Transaction, used: UsedCalibration[]): Promise<void> {
   const ids = [...new Set(used.map((calibration) => calibration.calibrationId))];
   const rows = await transaction
-    .select({ id: calibrations.id, endedAt: calibrations.endedAt, endedReason: calibrations.endedReason })
+    .select({ id: calibrations.id, endedAs: calibrations.endedAs, endedReason: calibrations.endedReason })
     .from(calibrations)
     .where(inArray(calibrations.id, ids))
     .orderBy(asc(calibrations.id))
     .for("share");
-  const reasons = new Map(rows.filter((row) => row.endedAt).map((row) => [row.id, row.endedReason]));
+  // One that was replaced in its time stays what these results rest on.
+  const lost = rows.filter(({ endedAs }) => endedAs === "revoked" || endedAs === "corrected");
+  const reasons = new Map(lost.map((row) => [row.id, `${row.endedAs}: ${row.endedReason}`]));
   const missing = used
     .filter(({ calibrationId }) => reasons.has(calibrationId))
     .map((ended) => `${ended.instrumentCode}, ${ended.reference}: ${reasons.get(ended.calibrationId)}`);

@@ -21,6 +21,7 @@ const columns = {
   offset: calibrations.offset,
   gainU: calibrations.gainU,
   offsetU: calibrations.offsetU,
+  endedAs: calibrations.endedAs,
   endedAt: calibrations.endedAt,
   endedReason: calibrations.endedReason,
 };

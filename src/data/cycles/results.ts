@@ -1,4 +1,4 @@
-import type { Collection, InstrumentKind, Phase, StaffRole } from "../../db/vocabulary";
+import type { CalibrationEnd, Collection, InstrumentKind, Phase, StaffRole } from "../../db/vocabulary";
 import type { CycleFigures, FlowReference, SetVerdict } from "../../metrology/cycle/types";
 import type { Verdict } from "../../metrology/uncertainty/decide";
 
@@ -99,7 +99,8 @@ export type UsedCalibration = {
   offset: number;
   gainU: number;
   offsetU: number;
-  /** Revoked or corrected since. */
+  /** A replaced one was in force in its time; a corrected or revoked one is not to be relied on. */
+  endedAs: CalibrationEnd | null;
   endedAt: Date | null;
   endedReason: string | null;
 };

@@ -45,9 +45,18 @@ function columnsIn(zone: string): DataColumn<Row>[] {
     {
       key: "state",
       head: "Since",
-      cell: (row) =>
-        row.endedAt ? <StatusMark kind="fail">ended: {row.endedReason}</StatusMark> : "in force",
+      cell: standing,
       wrap: true,
     },
   ];
+}
+
+function standing({ endedAs, endedReason }: Row) {
+  if (endedAs === null) return "in force";
+  if (endedAs === "replaced") return "replaced since";
+  return (
+    <StatusMark kind="fail">
+      {endedAs}: {endedReason}
+    </StatusMark>
+  );
 }
