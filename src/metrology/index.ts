@@ -1,4 +1,5 @@
 export { calibrateChannel } from "./calibration/calibrate-channel";
+export { checkReadings } from "./cycle/check-readings";
 export type { CheckAgainst, Doubt } from "./cycle/doubt";
 export { evaluateCycle } from "./cycle/evaluate-cycle";
 export { judgeSet } from "./cycle/judge-set";

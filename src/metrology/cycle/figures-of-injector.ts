@@ -1,6 +1,6 @@
 import { budgetStaticFlow } from "./budget-static-flow";
 import type { Conversion } from "./convert-conditions";
-import { convertDynamic, convertHeldOpen, type OwnFlow, type PulseFlow } from "./convert-reading";
+import { convertInjector } from "./convert-injector";
 import { fitInjectorLine, type InjectorLine } from "./fit-injector-line";
 import { flowsByWidth } from "./flows-by-width";
 import { meanFlow } from "./mean-flow";
@@ -25,7 +25,7 @@ export function figuresOfInjector(injector: CycleInjector, beside: Beside): Inje
 
 function evaluate(injector: CycleInjector, beside: Beside): InjectorResult {
   const { injectorId, channel } = injector;
-  const { pulses, held } = convertAll(injector, beside);
+  const { pulses, held } = convertInjector(injector, beside);
   const mean = held.length > 0 ? meanFlow(held, channel.calibration) : null;
   const heldOpen = mean && { mlPerMin: mean.flow, ownU: mean.ownU };
   const line = fitInjectorLine(pulses);
@@ -37,15 +37,6 @@ function evaluate(injector: CycleInjector, beside: Beside): InjectorResult {
     figures: { injectorId, ...measured, ...figuresOfLine(line, own.slope, heldOpen, beside) },
     deadTimeOwnU: total(own.deadTime),
   };
-}
-
-function convertAll({ channel, readings }: CycleInjector, beside: Beside) {
-  const pulses: PulseFlow[] = [];
-  const held: OwnFlow[] = [];
-  for (const reading of readings)
-    if (reading.kind === "dynamic") pulses.push(convertDynamic(reading, { ...beside, channel }));
-    else held.push(convertHeldOpen(reading, { ...beside, channel }));
-  return { pulses, held };
 }
 
 function figuresOfLine(
