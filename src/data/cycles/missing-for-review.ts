@@ -15,7 +15,7 @@ export function missingForReview(
   if (!asFound) return ["No cycle as found is recorded."];
   if (!asLeft) return ["No cycle as left is recorded."];
   const windings = workAsked.includes("winding check") || toleranceClass.resistanceRangeOhm !== null;
-  const leakages = toleranceClass.leakageLimitMm3PerMin !== null;
+  const leakages = asLeft.verdict.criteria.some((criterion) => criterion.kind === "leakage");
   return [
     ...injectors.flatMap(({ setInjectorId, tag }) =>
       lacking(asLeft, setInjectorId, tag, { windings, leakages }),

@@ -84,17 +84,20 @@ function verdictOn(
   only: Set<string> | undefined,
 ) {
   const counting = injectors.filter((injector) => !only || only.has(injector.setInjectorId));
+  const leakages = counting.flatMap(({ setInjectorId, checks }) =>
+    checks.leakageMm3PerMin === null
+      ? []
+      : [{ injectorId: setInjectorId, mm3PerMin: checks.leakageMm3PerMin }],
+  );
+  // Leakage is judged where the class asks for it or where the lab measured it, and then on every injector.
+  const judged = leakages.length > 0 || basis.toleranceClass.leakageLimitMm3PerMin !== null;
   return judgeSet({
     figures,
     toleranceClass: basis.toleranceClass,
     resistances: counting.flatMap(({ setInjectorId, resistance }) =>
       resistance ? [{ injectorId: setInjectorId, ...resistance }] : [],
     ),
-    leakages: counting.flatMap(({ setInjectorId, checks }) =>
-      checks.leakageMm3PerMin === null
-        ? []
-        : [{ injectorId: setInjectorId, mm3PerMin: checks.leakageMm3PerMin }],
-    ),
-    leakageLimit: leakageLimitMm3PerMin,
+    leakages,
+    ...(judged ? { leakageLimit: leakageLimitMm3PerMin } : {}),
   });
 }

@@ -40,7 +40,7 @@ export const styles = {
 
 /** Room for a line of text of this size, from one line to the next. */
 export function leadingOf({ size }: TextStyle): number {
-  return size * 1.36;
+  return size * 1.3;
 }
 
 /** Millimetres into points. */

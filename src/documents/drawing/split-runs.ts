@@ -13,15 +13,18 @@ export function splitRuns(text: string, weight: Weight, field: string): Run[] {
   const runs: Run[] = [];
   for (const sign of text) {
     const current = runs.at(-1);
-    if (current && covers(current.script, sign, weight)) {
-      current.text += sign;
-      continue;
-    }
-    const script = scripts.find((candidate) => covers(candidate, sign, weight));
+    const script = scriptOf(sign, weight, current?.script);
     if (!script) throw new MissingGlyphError(sign, field);
-    runs.push({ script, text: sign });
+    if (current?.script === script) current.text += sign;
+    else runs.push({ script, text: sign });
   }
   return runs;
+}
+
+/** An accent stays with its letter. All else goes to the first file: blanks in the later ones cannot be read by pdfkit. */
+function scriptOf(sign: string, weight: Weight, before: Script | undefined): Script | undefined {
+  if (before && /\p{M}/u.test(sign) && covers(before, sign, weight)) return before;
+  return scripts.find((script) => covers(script, sign, weight));
 }
 
 /** The first sign of a text that the documents cannot print; null when all can be. Line breaks are no signs. */

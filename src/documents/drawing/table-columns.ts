@@ -43,7 +43,7 @@ export function leastWidth(pen: Pen, spec: TableSpec, setting: Setting): number 
 }
 
 export function naturalWidths(pen: Pen, spec: TableSpec, setting: Setting): number[] {
-  return spec.columns.map((column, index) => {
+  const widths = spec.columns.map((column, index) => {
     const key = scaled(styles.key, setting);
     const head = Math.max(0, ...column.title.map((text) => pen.measure(text, key)));
     if (column.flex) return Math.max(head, narrowestFlex);
@@ -56,6 +56,8 @@ export function naturalWidths(pen: Pen, spec: TableSpec, setting: Setting): numb
       }),
     );
   });
+  const widest = Math.max(0, ...widths.filter((_, index) => spec.columns[index]!.even));
+  return widths.map((width, index) => (spec.columns[index]!.even ? widest : width));
 }
 
 function sumOf(numbers: readonly number[]): number {

@@ -13,6 +13,8 @@ export type Column = {
   align: "left" | "right";
   /** Share of the room that is left over; such a column wraps its text instead of claiming its natural width. */
   flex?: number;
+  /** All columns so marked are as wide as the widest of them. */
+  even?: boolean;
 };
 
 export type Row = { cells: readonly Cell[]; rule?: "strong" };

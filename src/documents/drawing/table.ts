@@ -8,7 +8,7 @@ import { markRoom, type PlacedColumn, placeColumns, type Setting, scaled } from 
 import type { CellLine, Column, Row, TableSpec } from "./table-spec";
 import { baselineOf } from "./text-blocks";
 
-const padding = 3.2;
+const padding = 2.7;
 export const usualSetting: Setting = { scale: 1, gap: 8 };
 
 type Place = { column: Column; placed: PlacedColumn };

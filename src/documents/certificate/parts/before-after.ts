@@ -6,7 +6,7 @@ import { figure, quietWords, words } from "../../drawing/cells";
 import type { Pen } from "../../drawing/pen";
 import { railStripBlock } from "../../drawing/rail-strip";
 import { table } from "../../drawing/table";
-import type { Row } from "../../drawing/table-spec";
+import type { TableSpec } from "../../drawing/table-spec";
 import { heading } from "../../drawing/text-blocks";
 import type { CertificateContent, CertifiedPhase } from "../content";
 import { figuresOf, phasesOf, placeOf } from "../reading-content";
@@ -20,7 +20,7 @@ export function beforeAndAfter(pen: Pen, content: CertificateContent, width: num
   const stripWidth = wide ? width : width * 0.6;
   const tableWidth = wide ? width : width - stripWidth - 18;
   const strip = railStripOf(pen, content, stripWidth);
-  const change = changeTable(pen, content, tableWidth);
+  const change = changeTable(pen, content, tableWidth, wide);
   return wide
     ? stack([strip, change], 10)
     : beside([
@@ -47,7 +47,7 @@ function railStripOf(pen: Pen, content: CertificateContent, width: number): Bloc
       labels: content.injectors.map(placeOf),
       halfLimitPercent: half,
       width,
-      height: 104,
+      height: 98,
     }),
   ]);
 }
@@ -60,30 +60,63 @@ function deviationsOf({ injectors }: CertificateContent, phase: CertifiedPhase):
   });
 }
 
-function changeTable(pen: Pen, content: CertificateContent, width: number): Block {
-  const row = (name: string, quantity: Quantity, of: (phase: CertifiedPhase) => number | null): Row => {
-    const [found, left] = phasesOf(content).map((phase) => formatNumber(of(phase), quantity));
-    return { cells: [words(`${name}, ${unitOf(quantity)}`), quietWords(found!), figure(left!)] };
-  };
-  const { head, rows } = table(
-    pen,
-    {
-      columns: [
-        { title: ["The set"], align: "left" },
-        { title: ["as found"], align: "right" },
-        { title: ["as left"], align: "right" },
-      ],
-      rows: [
-        row("Static flow, mean", "staticFlow", meanStaticFlow),
-        row("Spread of static flow", "spread", ({ figures }) => figures.staticSpread?.spreadPercent ?? null),
-        row("Widest spread at a width", "spread", widestSpread),
-        row("Range of dead times", "deadTime", ({ figures }) => figures.deadTimeRange?.rangeMs ?? null),
-        row("Range of resistances", "resistance", resistanceRange),
-      ],
-    },
-    width,
-  );
+const changes: {
+  name: readonly [string, string];
+  quantity: Quantity;
+  of: (phase: CertifiedPhase) => number | null;
+}[] = [
+  { name: ["Static flow,", "mean"], quantity: "staticFlow", of: meanStaticFlow },
+  {
+    name: ["Spread of", "static flow"],
+    quantity: "spread",
+    of: ({ figures }) => figures.staticSpread?.spreadPercent ?? null,
+  },
+  { name: ["Widest spread", "at a pulse width"], quantity: "spread", of: widestSpread },
+  {
+    name: ["Range of", "dead times"],
+    quantity: "deadTime",
+    of: ({ figures }) => figures.deadTimeRange?.rangeMs ?? null,
+  },
+  { name: ["Range of", "resistances"], quantity: "resistance", of: resistanceRange },
+];
+
+/** Beside a narrow strip the figures stand below each other, below a wide one side by side. */
+function changeTable(pen: Pen, content: CertificateContent, width: number, wide: boolean): Block {
+  const { head, rows } = table(pen, wide ? changesInColumns(content) : changesInRows(content), width);
   return stack([head, ...rows]);
+}
+
+function changesInRows(content: CertificateContent): TableSpec {
+  return {
+    columns: [
+      { title: ["The set"], align: "left" },
+      { title: ["as found"], align: "right" },
+      { title: ["as left"], align: "right" },
+    ],
+    rows: changes.map(({ name, quantity, of }) => {
+      const [found, left] = phasesOf(content).map((phase) => formatNumber(of(phase), quantity));
+      return { cells: [words(`${name.join(" ")}, ${unitOf(quantity)}`), quietWords(found!), figure(left!)] };
+    }),
+  };
+}
+
+function changesInColumns(content: CertificateContent): TableSpec {
+  const [found, left] = phasesOf(content).map((phase) =>
+    changes.map(({ quantity, of }) => formatNumber(of(phase), quantity)),
+  );
+  return {
+    columns: [
+      { title: ["The set"], align: "left" },
+      ...changes.map(({ name: [first, second], quantity }) => ({
+        title: [first, `${second}, ${unitOf(quantity)}`],
+        align: "right" as const,
+      })),
+    ],
+    rows: [
+      { cells: [quietWords("as found"), ...found!.map(quietWords)] },
+      { cells: [words("as left"), ...left!.map(figure)] },
+    ],
+  };
 }
 
 function meanStaticFlow({ figures }: CertifiedPhase): number | null {

@@ -24,7 +24,10 @@ const columns: { title: string[]; write: (checks: CertifiedChecks) => string }[]
   { title: ["at", "kPa"], write: ({ leakage }) => formatNumber(leakage?.pressureKpa, "pressure") },
   { title: ["for", "s"], write: ({ leakage }) => formatNumber(leakage?.seconds, "openTime") },
   { title: ["Spray", "grade"], write: ({ sprayGrade }) => sprayGrade ?? noFigure },
-  { title: ["Channel,", "load"], write: ({ channelNumber, load }) => `${channelNumber}, ${load}` },
+  {
+    title: ["Channel"],
+    write: ({ channelNumber, load }) => (load > 1 ? `${channelNumber}, load ${load}` : String(channelNumber)),
+  },
 ];
 
 /** Winding, leakage and spray of every injector; what was not checked is a dash. */

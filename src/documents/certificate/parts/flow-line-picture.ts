@@ -1,5 +1,5 @@
 import "server-only";
-import { formatNumber, formatQuantity } from "../../../format/format-number";
+import { formatQuantity } from "../../../format/format-number";
 import { niceTicks } from "../../../format/picture/nice-ticks";
 import { drawAxes, openPlot, type Plot, polyline } from "../../drawing/axes";
 import { type Block, stack } from "../../drawing/block";
@@ -9,8 +9,9 @@ import { colours, styles } from "../../drawing/print-style";
 import { heading } from "../../drawing/text-blocks";
 import type { CertificateContent, CertifiedPhase } from "../content";
 import { isInLinearRange, measuredWidths } from "../reading-content";
+import { widthTicks } from "./width-ticks";
 
-const height = 150;
+const height = 136;
 
 /** Flow per pulse against pulse width: each injector's line, and the set's mean at each width. */
 export function flowLinePicture(pen: Pen, content: CertificateContent, width: number): Block {
@@ -24,18 +25,17 @@ function draw(pen: Pen, content: CertificateContent, [x, y, width]: [number, num
   const xTicks = niceTicks(0, longest, 5);
   const yTicks = niceTicks(0, largestFlow(content), 4);
   const plot = openPlot(
-    { left: x + 28, top: y + 10, width: width - 34, height: height - 30 },
+    { left: x + 28, top: y + 10, width: width - 34, height: height - 26 },
     { low: 0, high: Math.max(longest, xTicks.at(-1)!) },
     { low: 0, high: yTicks.at(-1)! },
   );
   drawAxes(
     pen,
     plot,
-    xTicks.map((value) => ({ value, label: formatNumber(value, "pulseWidth") })),
+    widthTicks(xTicks),
     yTicks.map((value) => ({ value, label: String(value) })),
   );
   pen.write("µL", plot.left - 5, y + 4, styles.axis, "right");
-  pen.write("ms", plot.left + plot.width, plot.top + plot.height + 18, styles.axis, "right");
   drawLines(pen, plot, asFound, longest, { colour: colours.found, width: 0.6 });
   drawLines(pen, plot, asLeft, longest, { colour: colours.petrol, width: 0.7 });
   drawMeans(pen, plot, asLeft, content);

@@ -21,7 +21,7 @@ export function flowTable(pen: Pen, content: CertificateContent, width: number):
     { title: ["Injector"], align: "left" },
     ...widths.map((value): Column => {
       const title = `${formatNumber(value, "pulseWidth")} ${unitOf("pulseWidth")}`;
-      return { title: [title, unitOf("flowPerPulse")], align: "right" };
+      return { title: [title, unitOf("flowPerPulse")], align: "right", even: true };
     }),
     { title: ["Static flow", unitOf("staticFlow")], align: "right" },
   ];
@@ -74,7 +74,9 @@ function summaryRows(content: CertificateContent, widths: number[]): Row[] {
   });
   return [
     ofSpreads("Spread, %", ({ spreadPercent }) => formatNumber(spreadPercent, "spread"), "strong"),
-    ofSpreads("its ±, %", ({ expandedUncertainty }) => formatUncertainty(expandedUncertainty, "spread")),
+    ofSpreads("± of the spread, %", ({ expandedUncertainty }) =>
+      formatUncertainty(expandedUncertainty, "spread"),
+    ),
     {
       cells: [
         words(`± of a flow, µL, k = ${coverageFactor}`),

@@ -1,5 +1,4 @@
 import "server-only";
-import { formatNumber } from "../../../format/format-number";
 import { niceTicks } from "../../../format/picture/nice-ticks";
 import { spreadLabels } from "../../../format/picture/spread-labels";
 import { drawAxes, openPlot, type Plot, polyline, type Tick } from "../../drawing/axes";
@@ -10,8 +9,9 @@ import { colours, styles } from "../../drawing/print-style";
 import { heading } from "../../drawing/text-blocks";
 import type { CertificateContent, FuelError } from "../content";
 import { placeOf } from "../reading-content";
+import { widthTicks } from "./width-ticks";
 
-const height = 150;
+const height = 136;
 /** Pulse widths of an idling engine; common practice, no source. */
 const idle = { fromMs: 2.5, toMs: 4 };
 const usualWidths = [0.5, 1, 1.5, 2, 3, 4, 6, 8, 10, 12, 16, 20, 30, 50];
@@ -48,14 +48,13 @@ function draw(
   const largest = Math.max(0.5, ...injectors.flatMap(({ errorPercent }) => errorPercent.map(Math.abs)));
   const yTicks = niceTicks(-largest, largest, 4);
   const plot = openPlot(
-    { left: x + 28, top: y + 10, width: width - 50, height: height - 30 },
+    { left: x + 28, top: y + 10, width: width - 50, height: height - 26 },
     { low: from, high: to, logarithmic: true },
     { low: yTicks[0]!, high: yTicks.at(-1)! },
   );
   drawIdleBand(pen, plot, from, to);
-  drawAxes(pen, plot, widthTicks(from, to), yTicks.map(percentTick));
+  drawAxes(pen, plot, widthTicks(inRange(from, to)), yTicks.map(percentTick));
   pen.write("%", plot.left - 5, y + 4, styles.axis, "right");
-  pen.write("ms", plot.left + plot.width, plot.top + plot.height + 18, styles.axis, "right");
   line(pen, [plot.left, plot.y(0)], [plot.left + plot.width, plot.y(0)], { colour: colours.ink, width: 0.7 });
   for (const { errorPercent } of injectors)
     polyline(
@@ -71,9 +70,8 @@ function percentTick(value: number): Tick {
   return { value, label };
 }
 
-function widthTicks(from: number, to: number): Tick[] {
-  const inside = usualWidths.filter((width) => width >= from && width <= to);
-  return inside.map((value) => ({ value, label: formatNumber(value, "pulseWidth") }));
+function inRange(from: number, to: number): number[] {
+  return usualWidths.filter((width) => width >= from && width <= to);
 }
 
 function drawIdleBand(pen: Pen, plot: Plot, from: number, to: number): void {

@@ -7,7 +7,10 @@ import type { Block } from "../../drawing/block";
 import { type Fact, titleBlock } from "../../drawing/facts";
 import type { Pen } from "../../drawing/pen";
 import type { CertificateContent } from "../content";
+import { verdictLines } from "../verdict-lines";
 import { markOf, overallWords } from "../verdict-words";
+
+const mostNamed = 3;
 
 /** Customer, item, dates and verdict, as on a drawing's title block. */
 export function overviewOf(pen: Pen, content: CertificateContent, width: number): Block {
@@ -59,15 +62,20 @@ function injectorCounts({ injectors }: CertificateContent): string {
     .join(", ");
 }
 
-function verdictFact({ asLeft: { verdict } }: CertificateContent): Fact {
-  const passed = verdict.criteria.filter((criterion) => criterion.verdict === "pass").length;
+/** Names what did not simply pass, as far as a cell holds it. */
+function verdictFact(content: CertificateContent): Fact {
+  const { verdict } = content.asLeft;
+  const lines = verdictLines(content);
+  const others = lines.filter(({ left }) => left.verdict !== "pass");
+  const named = others
+    .slice(0, mostNamed)
+    .map(({ name, left }) => `${name}: ${left.verdict ?? "not judged"}`);
+  const more = others.length > mostNamed ? [`and ${others.length - mostNamed} more`] : [];
+  const passed = lines.length > 0 ? `${lines.length - others.length} of ${lines.length} criteria passed` : "";
   return {
     key: "Verdict as left",
     value: overallWords(verdict),
-    notes: [
-      `${passed} of ${plural(verdict.criteria.length, "criterion", "criteria")} passed`,
-      "decision rule with guard band w = U: see the verdict",
-    ],
+    notes: [passed, ...named, ...more],
     mark: markOf(verdict.verdict),
   };
 }

@@ -21,7 +21,7 @@ export function verdictSections(pen: Pen, content: CertificateContent, width: nu
       { title: "Verdict", note },
       {
         columns: [
-          { title: ["Criterion"], align: "left", flex: 1 },
+          { title: ["Criterion"], align: "left" },
           { title: ["Limit"], align: "right" },
           { title: ["As found"], align: "right" },
           { title: ["Verdict"], align: "left" },
@@ -44,7 +44,7 @@ function rowOf({ name, unit, limit, found, left }: VerdictLine): Row {
   return {
     cells: [
       words(name),
-      words(formatQuantity(limit, quantity)),
+      words(formatQuantity(limit, unit === "%" ? "tolerance" : quantity)),
       quietWords(found ? write(found) : noFigure),
       found ? verdict(found) : quietWords(noFigure),
       figure(write(left)),

@@ -3,15 +3,9 @@ import { useEffect, useState, useSyncExternalStore } from "react";
 import useSWR from "swr";
 import type { DraftFields } from "../../../data/cycles/draft-fields";
 import { DraftStore } from "./draft-store";
+import { type DraftChanges, fetchChanges, takeChanges } from "./fetch-changes";
 
 type Opened = { draftId: string; version: number; fields: DraftFields; savedAt: string };
-type Changes = {
-  version: number;
-  fields: DraftFields | null;
-  savedBy: string;
-  closed: "recorded" | "put away" | null;
-};
-
 const everyMs = 4000;
 
 /** The draft's store, kept in step with the device, the server and what others type. */
@@ -39,24 +33,15 @@ export function useDraftStore(opened: Opened) {
 }
 
 /** Asks every few seconds, while the page is looked at, what others did to the sheet. */
-function useOthers(store: DraftStore, closed: boolean): Changes | undefined {
-  const { data } = useSWR<Changes>(closed ? null : store.draftId, fetchChanges, {
+function useOthers(store: DraftStore, closed: boolean): DraftChanges | undefined {
+  const { data } = useSWR<DraftChanges>(closed ? null : store.draftId, () => fetchChanges(store), {
     refreshInterval: everyMs,
     shouldRetryOnError: true,
     errorRetryInterval: everyMs,
   });
 
-  async function fetchChanges(draftId: string): Promise<Changes> {
-    const { version } = store.snapshot().state;
-    const response = await fetch(`/api/data/drafts/${draftId}?version=${version}`);
-    if (!response.ok) throw new Error(`answer ${response.status}`);
-    return (await response.json()) as Changes;
-  }
-
   useEffect(() => {
-    if (!data) return;
-    if (data.closed) store.close(`This sheet was ${data.closed} by ${data.savedBy}.`);
-    else store.takeOthers(data);
+    if (data) takeChanges(store, data);
   }, [data, store]);
 
   return data;

@@ -5,7 +5,8 @@ export type GridRow =
   | { kind: "width"; id: string }
   | { kind: "amountOfPulses"; id: string }
   | { kind: "reading"; id: string; setInjectorId: string; repeat: number }
-  | { kind: "mean" | "spread"; id: string };
+  | { kind: "mean"; id: string }
+  | { kind: "spread"; id: string };
 
 export type GridColumn =
   | { kind: "label"; id: string }

@@ -1,0 +1,23 @@
+import { announce, stayUntilStopped } from "./announce.mjs";
+import { serve } from "./application.mjs";
+import { applicationDatabase, demoSignIns } from "./application-database.mjs";
+import { ensureBuild, servedBuild } from "./build.mjs";
+import { requirePort } from "./ports.mjs";
+import { appEnvironment } from "./scripts.mjs";
+import { runSession } from "./session.mjs";
+import { setUp } from "./set-up.mjs";
+import { step } from "./terminal.mjs";
+
+await runSession(async () => {
+  const { port, cluster } = await setUp("start");
+  await step("build", () => ensureBuild(servedBuild));
+  await requirePort();
+  const env = { ...appEnvironment(cluster, applicationDatabase, port), NODE_ENV: "production" };
+  const application = await step(
+    "application",
+    () => serve("start", port, env),
+    () => "ready",
+  );
+  announce(port, await demoSignIns(cluster));
+  await stayUntilStopped(application);
+});
