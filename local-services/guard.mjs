@@ -53,11 +53,12 @@ export function onGroupsChange(listener) {
 
 export async function dismissGuardian() {
   if (!guardian?.pid || guardian.exitCode !== null) return;
-  tell({ done: true });
-  guardian.stdin.end();
+  guardian.ref();
   await new Promise((resolve) => {
     guardian.once("exit", resolve);
-    setTimeout(resolve, 2_000).unref();
+    setTimeout(resolve, 2_000);
+    tell({ done: true });
+    guardian.stdin.end();
   });
 }
 
