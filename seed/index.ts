@@ -7,7 +7,8 @@ import { openRecordClock } from "./record-clock";
 const url = process.env.DATABASE_OWNER_URL;
 if (!url) throw new Error("DATABASE_OWNER_URL is not set: the owner's address of the database to fill");
 const someone = await database().select({ id: people.id }).from(people).limit(1);
-if (someone.length > 0) throw new Error("The database has people already: the demo is only made in an empty one");
+if (someone.length > 0)
+  throw new Error("The database has people already: the demo is only made in an empty one");
 const clock = openRecordClock(url);
 try {
   await playDemo(clock, (line) => console.log(line));

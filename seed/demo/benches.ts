@@ -1,6 +1,6 @@
 import type { Context } from "../../src/data/access/actor";
 import { addCalibratedBench, type CalibratedBench } from "../factories/benches";
-import { daysAfter, dayOf } from "../timeline";
+import { dayOf, daysAfter } from "../timeline";
 
 export type DemoBench = CalibratedBench & {
   /** Null for a bench whose calibration has run out. */

@@ -1,7 +1,7 @@
 import { checkIn } from "../factories/sets";
-import { daysAfter, dayOf, type Happening, workMoment } from "../timeline";
+import { dayOf, daysAfter, type Happening, workMoment } from "../timeline";
 import type { SetPlan } from "./plan-sets";
-import type { World } from "./play";
+import type { World } from "./world";
 
 /** What happens to a planned set, up to where it has come. */
 export function courseOf(world: World, plan: SetPlan): Happening[] {

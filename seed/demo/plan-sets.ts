@@ -1,6 +1,6 @@
 import type { Stage } from "../../src/db/vocabulary";
 import { uniformGenerator } from "../../src/metrology/uncertainty/uniform-generator";
-import type { World } from "./play";
+import type { World } from "./world";
 
 export type SetPlan = {
   /** Counts the sets: what is random about one follows from it. */

@@ -1,12 +1,13 @@
 import { calibrateBench } from "../factories/benches";
 import type { RecordClock } from "../record-clock";
-import { daysAfter, dayOf, type Happening, runTimeline, workMoment } from "../timeline";
+import { dayOf, daysAfter, type Happening, runTimeline, workMoment } from "../timeline";
 import { addBenches, type DemoBench } from "./benches";
+import { courseOf } from "./course";
 import { addCustomers } from "./customers";
 import { describeLab } from "./lab";
 import { addDemoCustomerPerson, addStaff, type Staff } from "./people";
 import { planSets } from "./plan-sets";
-import { courseOf } from "./course";
+import type { World } from "./world";
 
 const beginsDaysAgo = 430;
 
@@ -19,19 +20,12 @@ export async function playDemo(clock: RecordClock, say: (line: string) => void):
   const customers = await addCustomers(staff.counter.context);
   await addDemoCustomerPerson(customers[0]!);
   const benches = await addBenches(staff.manager.context, lab.fluidId, workMoment(now, beginsDaysAgo, 8));
-  const world = { now, staff, ...lab, customers, benches };
+  const world: World = { now, staff, ...lab, customers, benches };
   const sets = planSets(world).map((plan) => courseOf(world, plan));
   await runTimeline([...sets.flat(), ...calibrating(now, staff, benches)], clock, (done, of) => {
     if (done % 40 === 0 || done === of) say(`${Math.round((100 * done) / of)} % of fourteen months`);
   });
 }
-
-export type World = {
-  now: Date;
-  staff: Staff;
-  customers: string[];
-  benches: DemoBench[];
-} & Awaited<ReturnType<typeof describeLab>>;
 
 /** The yearly calibrations of the benches in daily use; the last bench was forgotten. */
 function calibrating(now: Date, { manager }: Staff, benches: DemoBench[]): Happening[] {

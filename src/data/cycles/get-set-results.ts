@@ -2,7 +2,6 @@ import "server-only";
 import { and, eq, exists, inArray, sql } from "drizzle-orm";
 import type { Connection } from "../../db/client";
 import { certificates } from "../../db/schema/certificates";
-import { injectors, setInjectors } from "../../db/schema/injectors";
 import { sets } from "../../db/schema/sets";
 import type { Context } from "../access/actor";
 import type { Grant } from "../access/authorize";
@@ -10,6 +9,7 @@ import { notFound } from "../access/errors";
 import { loadCleaningRuns } from "../cleaning-runs";
 import { read } from "../read";
 import { getSetResultsInput } from "./inputs";
+import { loadPlaced } from "./load-placed";
 import { loadReadingFiles } from "./load-reading-files";
 import { loadRevisions } from "./load-revisions";
 import { loadSetBasis } from "./load-set-basis";
@@ -63,21 +63,4 @@ async function requireReachable(connection: Connection, setId: string, grant: Gr
     .from(sets)
     .where(and(eq(sets.id, setId), within));
   if (!found) throw notFound("set");
-}
-
-export type Placed = Awaited<ReturnType<typeof loadPlaced>>;
-
-async function loadPlaced(connection: Connection, setId: string) {
-  const rows = await connection
-    .select({
-      setInjectorId: setInjectors.id,
-      position: setInjectors.position,
-      tag: setInjectors.tag,
-      serial: injectors.serial,
-      state: setInjectors.state,
-    })
-    .from(setInjectors)
-    .innerJoin(injectors, eq(injectors.id, setInjectors.injectorId))
-    .where(eq(setInjectors.setId, setId));
-  return new Map(rows.map((row) => [row.setInjectorId, row]));
 }

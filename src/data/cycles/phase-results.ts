@@ -4,7 +4,7 @@ import { judgeSet } from "../../metrology/cycle/judge-set";
 import type { CycleFigures } from "../../metrology/cycle/types";
 import { decide, type Verdict } from "../../metrology/uncertainty/decide";
 import { evaluateRevision } from "./evaluate-revision";
-import type { Placed } from "./get-set-results";
+import type { Placed } from "./load-placed";
 import type { LoadedRevision } from "./load-revisions";
 import type { SetBasis } from "./load-set-basis";
 import { withoutCycle } from "./repeated-cycles";

@@ -1,4 +1,5 @@
-import { type FlowLine, type FlowPoint, fitFlowLine } from "../line/fit-flow-line";
+import { type FlowLine, fitFlowLine } from "../line/fit-flow-line";
+import type { FlowPoint } from "../line/flow-point";
 import type { PulseFlow } from "./convert-reading";
 
 /** `scatterSe`: standard error of the slope from the scatter about the line, weighted or not. */

@@ -1,5 +1,5 @@
-import { asPoint, type FlowPoint } from "./fit-flow-line";
 import { fitLine } from "./fit-line";
+import { asPoint, type FlowPoint } from "./flow-point";
 import { type Columns, readPoints } from "./read-points";
 
 type Rule = { maxDeviationPercent: number; minWidths: number };

@@ -1,10 +1,8 @@
 import { requireFinite, requireNumber, requireProbability } from "../limits";
 import { findLinearRange } from "./find-linear-range";
 import { fitLine, type LineFit } from "./fit-line";
+import { asPoint, type FlowPoint } from "./flow-point";
 import { xIntercept } from "./x-intercept";
-
-/** `u`: standard uncertainty of the volume per pulse, given for all points or for none. */
-export type FlowPoint = { pulseWidthMs: number; volumePerPulseUl: number; u?: number };
 
 export type FlowLine = {
   slopeUlPerMs: number;
@@ -66,11 +64,6 @@ function checked(point: FlowPoint, index: number): FlowPoint {
   requireNumber(`points[${index}].volumePerPulseUl`, point.volumePerPulseUl);
   return point;
 }
-
-export function asPoint({ pulseWidthMs: x, volumePerPulseUl: y, u }: FlowPoint) {
-  return u === undefined ? { x, y } : { x, y, u };
-}
-
 function againstLine({ pulseWidthMs, volumePerPulseUl }: FlowPoint, { slope, intercept }: LineFit) {
   const predictedUl = intercept + slope * pulseWidthMs;
   const deviation = (100 * (volumePerPulseUl - predictedUl)) / predictedUl;
