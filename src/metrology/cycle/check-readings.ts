@@ -73,7 +73,7 @@ function findInColumns(grid: Grid, offTheLine: OffTheLine[]): Doubt[] {
   );
   return [
     ...ofAnotherWidth,
-    ...others.flatMap((column) => {
+    ...others.flatMap((column): Doubt[] => {
       const predictions = predictColumn(grid, column, sound);
       const shifted = findShiftedColumn(grid, column, predictions);
       return shifted ? [shifted] : findExchangedInColumn(column, predictions);
