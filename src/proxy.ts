@@ -12,6 +12,8 @@ export function proxy(request: NextRequest) {
   forwarded.set("x-request-id", randomUUID());
   forwarded.set("content-security-policy", policy);
   forwarded.set("x-nonce", nonce);
+  // Where to come back to after signing in; a layout is not told its own path.
+  forwarded.set("x-path", request.nextUrl.pathname + request.nextUrl.search);
   const response = NextResponse.next({ request: { headers: forwarded } });
   for (const [name, value] of Object.entries({ ...fixed, "Content-Security-Policy": policy }))
     response.headers.set(name, value);
