@@ -2,15 +2,15 @@
 import { Button } from "@/ui/form/button";
 import { DeadEnd } from "@/ui/layout/dead-end";
 
-type Props = { error: Error & { digest?: string }; unstable_retry?: () => void; reset: () => void };
+type Props = { error: Error & { digest?: string }; retry: () => void };
 
 /** The log holds the cause under the same reference. */
-export default function ErrorPage({ error, reset }: Props) {
+export default function ErrorPage({ error, retry }: Props) {
   return (
     <DeadEnd
       title="This page could not be made"
       action={
-        <Button kind="primary" onClick={reset}>
+        <Button kind="primary" onClick={retry}>
           Try again
         </Button>
       }

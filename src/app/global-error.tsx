@@ -3,9 +3,9 @@ import "./globals.css";
 import { Button } from "@/ui/form/button";
 import { DeadEnd } from "@/ui/layout/dead-end";
 
-type Props = { error: Error & { digest?: string }; reset: () => void };
+type Props = { error: Error & { digest?: string }; retry: () => void };
 
-export default function GlobalError({ error, reset }: Props) {
+export default function GlobalError({ error, retry }: Props) {
   return (
     <html lang="en">
       <body>
@@ -13,7 +13,7 @@ export default function GlobalError({ error, reset }: Props) {
         <DeadEnd
           title="Evenrail could not be shown"
           action={
-            <Button kind="primary" onClick={reset}>
+            <Button kind="primary" onClick={retry}>
               Try again
             </Button>
           }
