@@ -17,16 +17,25 @@ export async function runTimeline(
 }
 
 const dayMs = 86_400_000;
-const settledAfterDays = 7;
 
-/** A moment in the lab's working hours, so many days ago; long ago never on a weekend. */
-export function workMoment(now: Date, daysAgo: number, hour: number, minute = 0): Date {
+/** A moment in the lab's hours, so many days ago. */
+export function daysBefore(now: Date, daysAgo: number, hour: number, minute = 0): Date {
   const at = new Date(now.getTime() - daysAgo * dayMs);
   at.setUTCHours(hour, minute, 0, 0);
-  const weekday = at.getUTCDay();
-  if (daysAgo > settledAfterDays && weekday === 6) at.setTime(at.getTime() - dayMs);
-  if (daysAgo > settledAfterDays && weekday === 0) at.setTime(at.getTime() + dayMs);
   return at;
+}
+
+/** So many working days later, at an hour of that day; a weekend itself counts as the Monday behind it. */
+export function workdaysAfter(begin: Date, workdays: number, hour: number, minute = 0): Date {
+  let at = onWorkday(begin);
+  for (let day = 0; day < workdays; day++) at = onWorkday(daysAfter(at, 1));
+  at.setUTCHours(hour, minute, 0, 0);
+  return at;
+}
+
+function onWorkday(at: Date): Date {
+  const weekday = at.getUTCDay();
+  return daysAfter(at, weekday === 6 ? 2 : weekday === 0 ? 1 : 0);
 }
 
 export function dayOf(at: Date): string {

@@ -14,7 +14,7 @@ import { recordSyntheticCycle } from "../factories/cycles";
 import { checkIn } from "../factories/sets";
 import { clean, release } from "../factories/steps";
 import { makeSetTruth } from "../factories/synthetic-bench";
-import { dayOf, daysAfter, type Happening, workMoment } from "../timeline";
+import { dayOf, daysAfter, daysBefore, type Happening, workdaysAfter } from "../timeline";
 import type { SetPlan } from "./plan-sets";
 import { drawSpray } from "./spray-photo";
 import type { World } from "./world";
@@ -30,26 +30,39 @@ const usual: { stage: Stage; days: number; hour: number }[] = [
   { stage: "handed over", days: 4, hour: 16 },
 ];
 
+/** A set that came lately is placed by plain days, so that it is where it should be on whatever day the demo is made. */
+const lately = 14;
+
 /** What happens to a planned set, up to where it has come. */
 export function courseOf(world: World, plan: SetPlan): Happening[] {
   const steps = stepsOf(world, plan);
   const last = usual.findIndex(({ stage }) => stage === plan.reached);
-  const minute = (plan.serial * 7) % 60;
-  const happenings = usual.slice(0, last + 1).map(({ stage, days, hour }): Happening => {
-    const daysAgo = Math.max(0, plan.checkedInDaysAgo - Math.round(days * plan.pace));
-    const at = workMoment(world.now, daysAgo, hour + (plan.serial % 3 === 0 ? 1 : 0), minute);
-    return { at: notLaterThan(world.now, at), what: steps[stage] };
-  });
+  const happenings = usual
+    .slice(0, last + 1)
+    .map(
+      ({ stage, days, hour }): Happening => ({ at: momentOf(world, plan, days, hour), what: steps[stage] }),
+    );
   return [...happenings, ...asideOf(world, plan, steps)];
 }
 
-/** What is planned for today's afternoon has happened a while ago all the same. */
-function notLaterThan(now: Date, at: Date): Date {
+function momentOf(
+  { now }: World,
+  { checkedInDaysAgo, pace, serial }: SetPlan,
+  days: number,
+  hour: number,
+): Date {
+  const minute = (serial * 7) % 60;
+  const later = hour + (serial % 3 === 0 ? 1 : 0);
+  const daysLater = Math.round(days * pace);
+  if (checkedInDaysAgo > lately)
+    return workdaysAfter(daysBefore(now, checkedInDaysAgo, 0), daysLater, later, minute);
+  const at = daysBefore(now, Math.max(0, checkedInDaysAgo - daysLater), later, minute);
+  // What is planned for this afternoon happened a while ago all the same.
   return at < now ? at : new Date(now.getTime() - 20 * 60_000);
 }
 
 function asideOf(world: World, plan: SetPlan, { hold }: ReturnType<typeof stepsOf>): Happening[] {
-  return plan.hold ? [{ at: workMoment(world.now, plan.checkedInDaysAgo - 2, 14, 20), what: hold }] : [];
+  return plan.hold ? [{ at: daysBefore(world.now, plan.checkedInDaysAgo - 2, 14, 20), what: hold }] : [];
 }
 
 /** The steps of one set, each by who does it. */
@@ -100,7 +113,7 @@ function stepsOf(world: World, plan: SetPlan) {
 
   return {
     "checked in": async () => {
-      const at = workMoment(world.now, plan.checkedInDaysAgo, 8);
+      const at = momentOf(world, plan, 0, 8);
       ({ setId } = await checkIn(counter.context, {
         customerId: plan.customerId,
         modelId: plan.model.modelId,

@@ -1,6 +1,6 @@
 import { calibrateBench } from "../factories/benches";
 import type { RecordClock } from "../record-clock";
-import { dayOf, daysAfter, type Happening, runTimeline, workMoment } from "../timeline";
+import { dayOf, daysAfter, daysBefore, type Happening, runTimeline } from "../timeline";
 import { addBenches, type DemoBench } from "./benches";
 import { courseOf } from "./course";
 import { addCustomers } from "./customers";
@@ -14,12 +14,12 @@ const beginsDaysAgo = 430;
 /** Fourteen months of an invented lab, the same for the same day. */
 export async function playDemo(clock: RecordClock, say: (line: string) => void): Promise<void> {
   const now = new Date();
-  await clock.setTo(workMoment(now, beginsDaysAgo, 8));
+  await clock.setTo(daysBefore(now, beginsDaysAgo, 8));
   const staff = await addStaff();
   const lab = await describeLab(staff.manager.context);
   const customers = await addCustomers(staff.counter.context);
   await addDemoCustomerPerson(customers[0]!);
-  const benches = await addBenches(staff.manager.context, lab.fluidId, workMoment(now, beginsDaysAgo, 8));
+  const benches = await addBenches(staff.manager.context, lab.fluidId, daysBefore(now, beginsDaysAgo, 8));
   const world: World = { now, staff, ...lab, customers, benches };
   const sets = planSets(world).map((plan) => courseOf(world, plan));
   await runTimeline([...sets.flat(), ...calibrating(now, staff, benches)], clock, (done, of) => {
@@ -32,7 +32,7 @@ function calibrating(now: Date, { manager }: Staff, benches: DemoBench[]): Happe
   return benches
     .filter(({ recalibratedDaysAgo }) => recalibratedDaysAgo !== null)
     .map(({ recalibratedDaysAgo, benchId, code }) => {
-      const at = workMoment(now, recalibratedDaysAgo!, 7, 15);
+      const at = daysBefore(now, recalibratedDaysAgo!, 7, 15);
       return {
         at,
         what: () =>
