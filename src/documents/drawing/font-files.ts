@@ -1,6 +1,7 @@
 import "server-only";
 import { readFileSync } from "node:fs";
 import path from "node:path";
+import { unpackWoff } from "./unpack-woff";
 
 export const weights = [400, 500, 600] as const;
 export type Weight = (typeof weights)[number];
@@ -13,5 +14,5 @@ const folder = "node_modules/@fontsource/ibm-plex-sans/files";
 
 export function readFontFile(script: Script, weight: Weight): Buffer {
   const file = `ibm-plex-sans-${script}-${weight}-normal.woff`;
-  return readFileSync(path.join(/* turbopackIgnore: true */ process.cwd(), folder, file));
+  return unpackWoff(readFileSync(path.join(/* turbopackIgnore: true */ process.cwd(), folder, file)));
 }
