@@ -166,6 +166,7 @@ export const verbs = {
   getCustomer: { row: 5 },
   checkInSet: { row: 6, writes: true },
   listSets: { row: 7 },
+  countSets: { row: 7 },
   listToday: { row: 7 },
   findSet: { row: 7 },
   getSet: { row: 7 },

@@ -2,6 +2,7 @@ import "server-only";
 
 export { checkInSet } from "./check-in-set";
 export { clearSetHold } from "./clear-set-hold";
+export { countSets } from "./count-sets";
 export { editIntake } from "./edit-intake";
 export { findKnownInjectors } from "./find-known-injectors";
 export { findSet } from "./find-set";

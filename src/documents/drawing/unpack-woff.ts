@@ -34,7 +34,7 @@ function assemble(flavor: number, tables: Table[]): Buffer {
   head.writeUInt16BE(2 ** power * 16, 6);
   head.writeUInt16BE(power, 8);
   head.writeUInt16BE((tables.length - 2 ** power) * 16, 10);
-  const parts = [head];
+  const parts: Buffer[] = [head];
   let offset = head.length;
   for (const [index, { tag, checksum, bytes }] of tables.entries()) {
     const at = sfnt.header + index * sfnt.entry;

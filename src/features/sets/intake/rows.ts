@@ -1,5 +1,5 @@
-import { mostInjectors, sameSerial } from "@/data/sets/inputs";
 import type { InjectorCondition } from "@/data/sets";
+import { mostInjectors, sameSerial } from "@/data/sets/inputs";
 
 /** One injector as it is typed. */
 export type IntakeRow = {

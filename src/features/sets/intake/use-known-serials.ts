@@ -12,10 +12,17 @@ async function ask(address: string): Promise<KnownInjector[]> {
 
 /** What the record knows of serials, shortly after they were typed. */
 export function useKnownSerials(modelId: string, serials: readonly string[]) {
-  const asked = useSettled(serials.map((serial) => serial.trim()).filter(Boolean).join("\n"), 300);
+  const asked = useSettled(
+    serials
+      .map((serial) => serial.trim())
+      .filter(Boolean)
+      .join("\n"),
+    300,
+  );
   const query = new URLSearchParams({ modelId });
   for (const serial of asked.split("\n")) if (serial) query.append("serial", serial);
   const address = modelId && asked ? `/api/data/sets/known-injectors?${query}` : null;
   const { data } = useSWR(address, ask, { keepPreviousData: true, revalidateOnFocus: false });
-  return (serial: string) => (serial.trim() ? data?.find((known) => sameSerial(known.serial, serial)) : undefined);
+  return (serial: string) =>
+    serial.trim() ? data?.find((known) => sameSerial(known.serial, serial)) : undefined;
 }
