@@ -1,5 +1,5 @@
 "use client";
-import { useState } from "react";
+import { useMemo, useState } from "react";
 import type { SetRow } from "@/data/sets";
 import type { Clock } from "@/format/calendar";
 import { formatDayOf } from "@/format/format-date";
@@ -27,6 +27,8 @@ type Props = {
 /** Sets with their rail strip, stage and promise. */
 export function SetList({ view, clock, search: asked = "", customerId, basePath = "/sets" }: Props) {
   const [search, setSearch] = useState(asked);
+  const columns = useMemo(() => columnsFor(clock, customerId === undefined), [clock, customerId]);
+  const filter = useMemo(() => ({ view, search, customerId }), [view, search, customerId]);
   return (
     <>
       <SearchInput
@@ -37,9 +39,9 @@ export function SetList({ view, clock, search: asked = "", customerId, basePath 
       />
       <ServerGrid
         label="Sets"
-        columns={columnsFor(clock, customerId === undefined)}
+        columns={columns}
         fetchPage={fetchSets}
-        filter={{ view, search, customerId }}
+        filter={filter}
         sort={[
           { column: "promisedOn", direction: view === "handed over" || view === "all" ? "desc" : "asc" },
         ]}
@@ -94,8 +96,12 @@ function columnsFor(clock: Clock, withCustomer: boolean): GridColumn<SetRow>[] {
 }
 
 function Rail({ rail }: SetRow) {
-  if (!rail) return <span className="text-small text-ink-2">not measured</span>;
+  if (!rail || !isMeasured(rail)) return <span className="text-small text-ink-2">not measured</span>;
   return <RailStrip size="list" {...rail} />;
+}
+
+function isMeasured({ found, left }: NonNullable<SetRow["rail"]>): boolean {
+  return [...found, ...left].some((deviation) => deviation !== null);
 }
 
 function StageWords({ stage, hold }: SetRow) {
@@ -113,7 +119,7 @@ function SetCard({ row, clock }: { row: SetRow; clock: Clock }) {
       <p className="text-small text-ink-2">
         {row.model}, {plural(row.injectors, "injector")}
       </p>
-      {row.rail ? <RailStrip size="list" {...row.rail} /> : null}
+      {row.rail && isMeasured(row.rail) ? <RailStrip size="list" {...row.rail} /> : null}
       <p className="text-small">
         Promised <PromiseWords set={row} clock={clock} />
       </p>

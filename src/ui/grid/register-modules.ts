@@ -5,6 +5,7 @@ import {
   InfiniteRowModelModule,
   ModuleRegistry,
   RowApiModule,
+  RowStyleModule,
   ScrollApiModule,
 } from "ag-grid-community";
 
@@ -16,6 +17,7 @@ export function registerListModules(): void {
     EventApiModule,
     InfiniteRowModelModule,
     RowApiModule,
+    RowStyleModule,
     ScrollApiModule,
   ]);
 }
