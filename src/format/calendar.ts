@@ -21,6 +21,11 @@ export function isoDay({ year, month, day }: CalendarDay): string {
   return [String(year).padStart(4, "0"), twoDigits(month), twoDigits(day)].join("-");
 }
 
+/** The day so many days after today by a clock: `2026-03-14`. */
+export function isoDayAfter({ now, zone }: Clock, days: number): string {
+  return isoDay(dayOf(new Date(now.getTime() + days * dayLength), zone));
+}
+
 /** Days from one calendar day to the next, whatever the clocks do in between. */
 export function daysBetween(from: CalendarDay, to: CalendarDay): number {
   return Math.round((atNoon(to) - atNoon(from)) / dayLength);

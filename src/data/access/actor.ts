@@ -27,6 +27,11 @@ export type Context = {
   transaction?: Transaction;
 };
 
+/** What a page shows or hides by; what may be done is decided in every verb again. */
+export function rolesOf(actor: Actor): readonly Role[] {
+  return actor.kind === "person" ? actor.roles : [];
+}
+
 /** How an actor stands in the records that hold no contact data. */
 export function actorLabel(actor: Actor): string {
   if (actor.kind === "person") return `person ${actor.personId}`;

@@ -11,6 +11,8 @@ export type FormField = {
   defaultValue: string | undefined;
   defaultOptions: string[] | undefined;
   defaultChecked: boolean | undefined;
+  /** The fields of a field that is a group. */
+  getFieldset?: () => object;
 };
 
 export type FormState = {

@@ -27,7 +27,7 @@ export function Form({ form: handle, guard = false, messages = true, className, 
     id: form.id,
     pending,
     reply,
-    fieldOf: (name: string) => (fields as Record<string, FormField>)[name],
+    fieldOf: (name: string) => fieldBelow(fields as Record<string, FormField>, name),
   };
   return (
     <FormContext value={state}>
@@ -47,4 +47,12 @@ export function Form({ form: handle, guard = false, messages = true, className, 
       </form>
     </FormContext>
   );
+}
+
+/** `customer.name` is the field name of the field customer. */
+function fieldBelow(fields: Record<string, FormField>, path: string): FormField | undefined {
+  const [first = "", ...rest] = path.split(".");
+  const found = fields[first];
+  if (!found || rest.length === 0) return found;
+  return fieldBelow((found.getFieldset?.() ?? {}) as Record<string, FormField>, rest.join("."));
 }

@@ -1,5 +1,6 @@
 import type { Metadata } from "next";
 import { currentContext } from "@/auth/current-actor";
+import { rolesOf } from "@/data/access/actor";
 import { answerPage } from "@/data/edge/answer-page";
 import { getLabCard } from "@/data/lab";
 import { countSets } from "@/data/sets";
@@ -26,7 +27,7 @@ export default async function SetsPage({ searchParams }: PageProps<"/sets">) {
   const context = await currentContext();
   const { clock } = await answerPage(getLabCard(context));
   const counts = await answerPage(countSets(context));
-  const roles = context.actor.kind === "person" ? context.actor.roles : [];
+  const roles = rolesOf(context.actor);
   return (
     <>
       <PageHeader

@@ -1,4 +1,4 @@
-import type { InjectorCondition } from "@/data/sets";
+import type { InjectorCondition, SetInjector } from "@/data/sets";
 import { mostInjectors, sameSerial } from "@/data/sets/inputs";
 
 /** One injector as it is typed. */
@@ -73,4 +73,23 @@ export function repeatedSerials(rows: IntakeRow[]): (number | null)[] {
     const first = rows.findIndex((other) => other.serial.trim() && sameSerial(other.serial, row.serial));
     return first < at ? first + 1 : null;
   });
+}
+
+/** An injector that is in the set already. */
+export function rowOf({
+  setInjectorId,
+  tag,
+  serial,
+  marking,
+  condition,
+  conditionNote,
+}: SetInjector): IntakeRow {
+  return {
+    ...newRow(condition),
+    setInjectorId,
+    tag: tag.slice(tag.lastIndexOf("/") + 1),
+    serial: serial ?? "",
+    marking,
+    conditionNote,
+  };
 }
