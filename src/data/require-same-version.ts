@@ -17,19 +17,16 @@ export function requireSameVersion<Values extends Record<string, unknown>>({
 }): void {
   if (stored.version === version) return;
   const differing = Object.keys(values).filter((field) => asText(stored[field]) !== asText(values[field]));
-  throw conflict(
-    "Somebody else changed this while you were typing.",
-    [
-      ...differing.map((field) => ({
-        field,
-        label: labels[field] ?? field,
-        theirs: asText(stored[field]),
-        yours: asText(values[field]),
-      })),
-      // With it the form can go on from what is saved now.
-      { field: "version", label: "Version", theirs: asText(stored.version), yours: asText(version) },
-    ],
-  );
+  throw conflict("Somebody else changed this while you were typing.", [
+    ...differing.map((field) => ({
+      field,
+      label: labels[field] ?? field,
+      theirs: asText(stored[field]),
+      yours: asText(values[field]),
+    })),
+    // With it the form can go on from what is saved now.
+    { field: "version", label: "Version", theirs: asText(stored.version), yours: asText(version) },
+  ]);
 }
 
 function asText(value: unknown): string {

@@ -32,6 +32,10 @@ export function rolesOf(actor: Actor): readonly Role[] {
   return actor.kind === "person" ? actor.roles : [];
 }
 
+export function personIdOf(actor: Actor): string {
+  return actor.kind === "person" ? actor.personId : "";
+}
+
 /** How an actor stands in the records that hold no contact data. */
 export function actorLabel(actor: Actor): string {
   if (actor.kind === "person") return `person ${actor.personId}`;

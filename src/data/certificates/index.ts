@@ -13,7 +13,7 @@ export { type CertificateDetail, type CertificateRevision, getCertificate } from
 export { getCertificateFile } from "./get-certificate-file";
 export { getDataSheet } from "./get-data-sheet";
 export { type CertificateRow, listCertificates } from "./list-certificates";
-export { recordersOf } from "./recorders-of";
+export { type RecordedPart, recordersOf } from "./recorders-of";
 export { reissueCertificate } from "./reissue-certificate";
 export { releaseCertificate } from "./release-certificate";
 export { revokeCertificate } from "./revoke-certificate";

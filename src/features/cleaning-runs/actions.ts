@@ -13,7 +13,7 @@ export async function recordCleaningRunAction(_previous: Previous, data: FormDat
   const { reply, result } = await answerForm(data, (payload) => recordCleaningRun(context, payload));
   if (!result) return reply;
   revalidatePath(`/sets/${result.setId}`);
-  redirect(`/sets/${result.setId}/cleaning`);
+  redirect(`/sets/${result.setId}`);
 }
 
 export async function correctCleaningRunAction(_previous: Previous, data: FormData): Promise<FormReply> {
@@ -21,5 +21,5 @@ export async function correctCleaningRunAction(_previous: Previous, data: FormDa
   const { reply, result } = await answerForm(data, (payload) => correctCleaningRun(context, payload));
   if (!result) return reply;
   revalidatePath(`/sets/${result.setId}`);
-  redirect(`/sets/${result.setId}/cleaning`);
+  redirect(`/sets/${result.setId}`);
 }

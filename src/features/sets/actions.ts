@@ -11,6 +11,8 @@ import {
   findSet,
   handOverSet,
   holdSet,
+  rejectInjector,
+  replaceInjector,
   returnSetUncleaned,
 } from "@/data/sets";
 
@@ -57,6 +59,20 @@ export async function clearSetHoldAction(_previous: Previous, data: FormData): P
 export async function returnSetUncleanedAction(_previous: Previous, data: FormData): Promise<FormReply> {
   const context = await currentWriter();
   const { reply, result } = await answerForm(data, (payload) => returnSetUncleaned(context, payload));
+  if (result) revalidatePath(`/sets/${result.setId}`);
+  return reply;
+}
+
+export async function rejectInjectorAction(_previous: Previous, data: FormData): Promise<FormReply> {
+  const context = await currentWriter();
+  const { reply, result } = await answerForm(data, (payload) => rejectInjector(context, payload));
+  if (result) revalidatePath(`/sets/${result.setId}`);
+  return reply;
+}
+
+export async function replaceInjectorAction(_previous: Previous, data: FormData): Promise<FormReply> {
+  const context = await currentWriter();
+  const { reply, result } = await answerForm(data, (payload) => replaceInjector(context, payload));
   if (result) revalidatePath(`/sets/${result.setId}`);
   return reply;
 }
