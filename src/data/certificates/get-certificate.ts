@@ -5,6 +5,7 @@ import type { Connection } from "../../db/client";
 import { certificates } from "../../db/schema/certificates";
 import { people } from "../../db/schema/people";
 import type { CertificateState } from "../../db/vocabulary";
+import type { CertificateContent } from "../../documents/certificate/content";
 import type { Context } from "../access/actor";
 import { read } from "../read";
 import { getCertificateInput } from "./inputs";
@@ -32,7 +33,7 @@ export function getCertificate(context: Context, raw: unknown) {
     const revisions = await revisionsOf(connection, stored.series);
     return {
       ...revisions.find((revision) => revision.certificateId === id)!,
-      content,
+      content: content as CertificateContent,
       setId: stored.setId,
       setNumber: stored.setNumber,
       contentSha256: stored.contentSha256,

@@ -1,0 +1,84 @@
+import type { Metadata } from "next";
+import Link from "next/link";
+import { currentContext } from "@/auth/current-actor";
+import { rolesOf } from "@/data/access/actor";
+import { getCertificate } from "@/data/certificates";
+import { answerPage } from "@/data/edge/answer-page";
+import { CertificateFiles } from "@/features/certificates/certificate-files";
+import { CertificateNotice } from "@/features/certificates/certificate-notice";
+import { CertificateStateMark } from "@/features/certificates/certificate-state";
+import { RevisionsTable } from "@/features/certificates/revisions-table";
+import { formatBytes } from "@/format/format-bytes";
+import { formatRecordInstant } from "@/format/format-date";
+import { Facts } from "@/ui/layout/facts";
+import { PageHeader } from "@/ui/layout/page-header";
+import { Sheet } from "@/ui/layout/sheet";
+import { labClock } from "../../lab-clock";
+import { CertificateSteps } from "./certificate-steps";
+
+type Props = PageProps<"/certificates/[certificateId]">;
+
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  const { number } = await answerPage(getCertificate(await currentContext(), await params));
+  return { title: `Certificate ${number}` };
+}
+
+/** A certificate: its state first, then its files, what it says in short, and its other revisions. */
+export default async function CertificatePage({ params }: Props) {
+  const context = await currentContext();
+  const certificate = await answerPage(getCertificate(context, await params));
+  const { zone } = await labClock(context);
+  const { content, number, state, revisions, setId, setNumber } = certificate;
+  return (
+    <>
+      <PageHeader
+        title={`Certificate ${number}`}
+        subtitle={`${content.customer.name}, set ${setNumber}`}
+        back={
+          <>
+            <Link href="/certificates">Certificates</Link>,{" "}
+            <Link href={`/sets/${setId}`}>set {setNumber}</Link>
+          </>
+        }
+        actions={
+          state === "current" && rolesOf(context.actor).includes("manager") ? (
+            <CertificateSteps context={context} certificate={certificate} />
+          ) : null
+        }
+      />
+      <div className="flex flex-col gap-3.5">
+        <CertificateNotice certificate={certificate} revisions={revisions} zone={zone} />
+        <Sheet title="Files">
+          <CertificateFiles certificate={certificate} prominent={state === "current"} />
+        </Sheet>
+        <Sheet title="What it says">
+          <Facts
+            align="left"
+            facts={[
+              { label: "State", value: <CertificateStateMark state={state} /> },
+              { label: "Issued", value: formatRecordInstant(certificate.issuedAt, zone) },
+              { label: "Released by", value: certificate.releasedBy },
+              { label: "Model", value: `${content.model.make} ${content.model.partNumber}` },
+              {
+                label: "Class",
+                value: `${content.toleranceClass.name}, revision ${content.toleranceClass.revision}`,
+              },
+              { label: "Verdict as left", value: content.asLeft.verdict.verdict ?? "no verdict" },
+              { label: "Verification code", value: certificate.verificationCode },
+              { label: "PDF", value: formatBytes(certificate.pdfBytes) },
+              { label: "SHA-256 of the PDF", value: <Hash value={certificate.pdfSha256} /> },
+              { label: "SHA-256 of the content", value: <Hash value={certificate.contentSha256} /> },
+            ]}
+          />
+        </Sheet>
+        <Sheet title="Revisions" padding="none">
+          <RevisionsTable revisions={revisions} hrefOf={(id) => `/certificates/${id}`} zone={zone} />
+        </Sheet>
+      </div>
+    </>
+  );
+}
+
+function Hash({ value }: { value: string }) {
+  return <span className="text-small break-all">{value}</span>;
+}
