@@ -86,7 +86,7 @@ function visitsOf(world: World): SetPlan[] {
     customerId: world.customers[0]!,
     model: world.models["KX-440"]!,
     toleranceClassId: world.classes["Road race"]!,
-    serials: serialsOf(900, 8),
+    serials: serialsOf(901, 8),
     promisedAfterDays: 7,
     pace: 1,
   };

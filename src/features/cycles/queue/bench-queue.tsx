@@ -27,7 +27,7 @@ export function BenchQueue({ sets, clock }: { sets: QueuedSet[]; clock: Clock })
           {sets.map((set) => (
             <li
               key={set.setId}
-              className="grid gap-x-5 gap-y-1.5 px-4 py-3 laptop:grid-cols-[7rem_minmax(0,1.6fr)_minmax(0,1fr)_11rem_auto] laptop:items-center"
+              className="grid gap-x-5 gap-y-1.5 px-4 py-3 laptop:grid-cols-[6rem_minmax(0,1.6fr)_minmax(0,1.2fr)_11rem_11rem] laptop:items-center"
             >
               <Link href={`/sets/${set.setId}`} className="font-semibold no-underline hover:underline">
                 {set.number}

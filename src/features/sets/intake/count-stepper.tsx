@@ -10,7 +10,7 @@ type Props = { count: number; onChange: (count: number) => void };
 export function CountStepper({ count, onChange }: Props) {
   return (
     <div className="flex items-center gap-1.5">
-      <label htmlFor="injector-count" className="text-small font-medium">
+      <label htmlFor="injector-count" className="text-small font-medium whitespace-nowrap">
         How many
       </label>
       <Button size="small" disabled={count <= 1} onClick={() => onChange(count - 1)}>
@@ -34,7 +34,7 @@ export function CountStepper({ count, onChange }: Props) {
           } else if (event.key === "ArrowUp") onChange(count + 1);
           else if (event.key === "ArrowDown") onChange(count - 1);
         }}
-        className={`${controlStyle} w-14 text-center`}
+        className={`${controlStyle} max-w-14 text-center`}
       />
       <Button size="small" disabled={count >= mostInjectors} onClick={() => onChange(count + 1)}>
         <Plus aria-hidden="true" size={14} />
