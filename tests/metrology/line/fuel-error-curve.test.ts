@@ -14,9 +14,7 @@ test("a mismatch of dead times hardly shows at 10 ms and dominates at idle, work
 });
 
 test("errors of a set sum to nothing; equal injectors have none", () => {
-  const [{ errorsPercent }] = fuelErrorCurve([...lines, { slopeUlPerMs: 7.2, deadTimeMs: 0.85 }], [3]) as [
-    { errorsPercent: number[] },
-  ];
+  const { errorsPercent } = fuelErrorCurve([...lines, { slopeUlPerMs: 7.2, deadTimeMs: 0.85 }], [3])[0]!;
   expect(errorsPercent.reduce((sum, error) => sum + error, 0)).toBeCloseTo(0, 10);
   expect(fuelErrorCurve([lines[0]!, lines[0]!], [3])[0]!.errorsPercent).toEqual([0, 0]);
 });
