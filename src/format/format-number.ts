@@ -29,7 +29,7 @@ export function dataNumber(value: Maybe, quantity: Quantity): string {
   return isFigure(value) ? digitsOf(value, quantity) : "";
 }
 
-/** `0.942 ± 0.011`: the uncertainty at the decimals of its value, and never rounded away to nothing. */
+/** `0.942 ± 0.011`: the uncertainty at the decimals of its value, and never rounded away to nothing. None is not zero. */
 export function formatWithUncertainty(
   value: Maybe,
   expanded: Maybe,
@@ -37,9 +37,10 @@ export function formatWithUncertainty(
   { unit = false }: { unit?: boolean } = {},
 ): string {
   if (!isFigure(value)) return noFigure;
-  const both = isFigure(expanded)
-    ? `${formatNumber(value, quantity)} ± ${formatUncertainty(expanded, quantity)}`
-    : formatNumber(value, quantity);
+  const both =
+    isFigure(expanded) && expanded > 0
+      ? `${formatNumber(value, quantity)} ± ${formatUncertainty(expanded, quantity)}`
+      : formatNumber(value, quantity);
   return unit ? withUnit(both, quantity) : both;
 }
 

@@ -6,11 +6,8 @@ import { getCertificate } from "@/data/certificates";
 import { answerPage } from "@/data/edge/answer-page";
 import { CertificateFiles } from "@/features/certificates/certificate-files";
 import { CertificateNotice } from "@/features/certificates/certificate-notice";
-import { CertificateStateMark } from "@/features/certificates/certificate-state";
+import { CertificateSummary } from "@/features/certificates/certificate-summary";
 import { RevisionsTable } from "@/features/certificates/revisions-table";
-import { formatBytes } from "@/format/format-bytes";
-import { formatRecordInstant } from "@/format/format-date";
-import { Facts } from "@/ui/layout/facts";
 import { PageHeader } from "@/ui/layout/page-header";
 import { Sheet } from "@/ui/layout/sheet";
 import { labClock } from "../../lab-clock";
@@ -51,34 +48,11 @@ export default async function CertificatePage({ params }: Props) {
         <Sheet title="Files">
           <CertificateFiles certificate={certificate} prominent={state === "current"} />
         </Sheet>
-        <Sheet title="What it says">
-          <Facts
-            align="left"
-            facts={[
-              { label: "State", value: <CertificateStateMark state={state} /> },
-              { label: "Issued", value: formatRecordInstant(certificate.issuedAt, zone) },
-              { label: "Released by", value: certificate.releasedBy },
-              { label: "Model", value: `${content.model.make} ${content.model.partNumber}` },
-              {
-                label: "Class",
-                value: `${content.toleranceClass.name}, revision ${content.toleranceClass.revision}`,
-              },
-              { label: "Verdict as left", value: content.asLeft.verdict.verdict ?? "no verdict" },
-              { label: "Verification code", value: certificate.verificationCode },
-              { label: "PDF", value: formatBytes(certificate.pdfBytes) },
-              { label: "SHA-256 of the PDF", value: <Hash value={certificate.pdfSha256} /> },
-              { label: "SHA-256 of the content", value: <Hash value={certificate.contentSha256} /> },
-            ]}
-          />
-        </Sheet>
+        <CertificateSummary certificate={certificate} zone={zone} />
         <Sheet title="Revisions" padding="none">
           <RevisionsTable revisions={revisions} hrefOf={(id) => `/certificates/${id}`} zone={zone} />
         </Sheet>
       </div>
     </>
   );
-}
-
-function Hash({ value }: { value: string }) {
-  return <span className="text-small break-all">{value}</span>;
 }

@@ -47,7 +47,7 @@ export default async function SetPage({ params }: Props) {
         actions={<SetActions set={set} roles={roles} />}
         moreCells={verdictCell(presented)}
       />
-      <div className="flex flex-col gap-3.5">
+      <div className="mt-3.5 flex flex-col gap-3.5">
         <BenchStep set={set} results={results} personId={personIdOf(context.actor)} roles={roles} />
         {set.stage === "in review" && roles.includes("manager") ? (
           <SetReview context={context} set={set} results={results} lab={lab} />
