@@ -1,0 +1,17 @@
+import { benchFlowLine } from "./flow-line";
+import type { BenchTable } from "./measure";
+import { printTable } from "./print-table";
+
+/** `npm run bench` runs all of them, `npm run bench -- flow-line` those that are named. */
+const benches: Record<string, () => Promise<BenchTable[]>> = {
+  "flow-line": benchFlowLine,
+};
+
+const asked = process.argv.slice(2);
+const unknown = asked.filter((name) => !(name in benches));
+if (unknown.length > 0) {
+  console.error(`No bench is called ${unknown.join(", ")}. There are: ${Object.keys(benches).join(", ")}.`);
+  process.exit(1);
+}
+for (const name of asked.length > 0 ? asked : Object.keys(benches))
+  for (const table of await benches[name]!()) printTable(table);
