@@ -1,5 +1,6 @@
 import type { Metadata } from "next";
 import { currentContext } from "@/auth/current-actor";
+import { authorize } from "@/data/access/authorize";
 import { getCustomer } from "@/data/customers";
 import { answerPage } from "@/data/edge/answer-page";
 import { getLabCard } from "@/data/lab";
@@ -15,6 +16,7 @@ const usualDays = 7;
 export default async function CheckInPage({ searchParams }: PageProps<"/sets/new">) {
   const { customer: customerId } = await searchParams;
   const context = await currentContext();
+  await answerPage(authorize(context, "checkInSet"));
   const { clock } = await answerPage(getLabCard(context));
   const classes = await answerPage(listToleranceClasses(context));
   const customer =

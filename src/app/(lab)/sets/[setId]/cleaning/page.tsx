@@ -1,6 +1,7 @@
 import type { Metadata } from "next";
 import Link from "next/link";
 import { currentContext } from "@/auth/current-actor";
+import { authorize } from "@/data/access/authorize";
 import { answerPage } from "@/data/edge/answer-page";
 import { getSet } from "@/data/sets";
 import { CleaningRunForm } from "@/features/cleaning-runs/cleaning-run-form";
@@ -13,7 +14,9 @@ export const metadata: Metadata = { title: "Cleaning run" };
 
 export default async function CleaningPage({ params }: PageProps<"/sets/[setId]/cleaning">) {
   const { setId } = await params;
-  const { number, injectors } = await answerPage(getSet(await currentContext(), { setId }));
+  const context = await currentContext();
+  await answerPage(authorize(context, "recordCleaningRun"));
+  const { number, injectors } = await answerPage(getSet(context, { setId }));
   const inSet = injectors.filter(({ state }) => state === "in set").length;
   return (
     <>

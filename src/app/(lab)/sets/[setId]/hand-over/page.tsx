@@ -1,6 +1,7 @@
 import type { Metadata } from "next";
 import Link from "next/link";
 import { currentContext } from "@/auth/current-actor";
+import { authorize } from "@/data/access/authorize";
 import { answerPage } from "@/data/edge/answer-page";
 import { getSet } from "@/data/sets";
 import { HandOverForm } from "@/features/sets/hand-over-form";
@@ -13,7 +14,9 @@ export const metadata: Metadata = { title: "Hand over" };
 
 export default async function HandOverPage({ params }: PageProps<"/sets/[setId]/hand-over">) {
   const { setId } = await params;
-  const set = await answerPage(getSet(await currentContext(), { setId }));
+  const context = await currentContext();
+  await answerPage(authorize(context, "handOverSet"));
+  const set = await answerPage(getSet(context, { setId }));
   const inSet = set.injectors.filter(({ state }) => state === "in set").length;
   const apart = set.injectors.length - inSet;
   return (

@@ -1,6 +1,7 @@
 import type { Metadata } from "next";
 import Link from "next/link";
 import { currentContext } from "@/auth/current-actor";
+import { authorize } from "@/data/access/authorize";
 import { answerPage } from "@/data/edge/answer-page";
 import { getSet } from "@/data/sets";
 import { listToleranceClasses } from "@/data/tolerance-classes";
@@ -13,6 +14,7 @@ export const metadata: Metadata = { title: "Edit intake" };
 export default async function IntakePage({ params }: PageProps<"/sets/[setId]/intake">) {
   const { setId } = await params;
   const context = await currentContext();
+  await answerPage(authorize(context, "editIntake"));
   const set = await answerPage(getSet(context, { setId }));
   const classes = await answerPage(listToleranceClasses(context, { withRetired: true }));
   const offered = classes.filter(
