@@ -55,7 +55,7 @@ export function fitFlowLine(
     deadTimeInterval: crossing.interval,
     line,
     linearRange: { ...range, ratio: range.toMs / range.fromMs },
-    points: points.map((point) => ({ ...againstLine(point, line), inLinearRange: isInside(point) })),
+    points: points.map((point) => againstLine(point, line, isInside(point))),
   };
 }
 
@@ -64,7 +64,12 @@ function checked(point: FlowPoint, index: number): FlowPoint {
   requireNumber(`points[${index}].volumePerPulseUl`, point.volumePerPulseUl);
   return point;
 }
-function againstLine({ pulseWidthMs, volumePerPulseUl }: FlowPoint, { slope, intercept }: LineFit) {
+
+function againstLine(
+  { pulseWidthMs, volumePerPulseUl }: FlowPoint,
+  { slope, intercept }: LineFit,
+  inLinearRange: boolean,
+) {
   const predictedUl = intercept + slope * pulseWidthMs;
   const deviation = (100 * (volumePerPulseUl - predictedUl)) / predictedUl;
   return {
@@ -72,5 +77,6 @@ function againstLine({ pulseWidthMs, volumePerPulseUl }: FlowPoint, { slope, int
     volumePerPulseUl,
     predictedUl,
     deviationPercent: predictedUl > 0 && Number.isFinite(deviation) ? deviation : null,
+    inLinearRange,
   };
 }
