@@ -21,9 +21,10 @@ export function isoDay({ year, month, day }: CalendarDay): string {
   return [String(year).padStart(4, "0"), twoDigits(month), twoDigits(day)].join("-");
 }
 
-/** The day so many days after today by a clock: `2026-03-14`. */
+/** The day so many days after today by a clock, whatever the clocks do in between: `2026-03-14`. */
 export function isoDayAfter({ now, zone }: Clock, days: number): string {
-  return isoDay(dayOf(new Date(now.getTime() + days * dayLength), zone));
+  const then = new Date(atNoon(dayOf(now, zone)) + days * dayLength);
+  return isoDay(dayOf(then, "UTC"));
 }
 
 /** Days from one calendar day to the next, whatever the clocks do in between. */
@@ -73,10 +74,10 @@ function formatterFor(zone: string): Intl.DateTimeFormat {
   return made;
 }
 
-/** "GMT+05:30" → "UTC+5:30", "GMT" → "UTC". */
+/** "GMT+05:30" → "UTC+5:30"; "GMT" and "GMT+00:00", as engines differ, → "UTC". */
 function offsetLabel(offset: string): string {
   const match = /^GMT(?:([+\-\u2212])(\d{2}):(\d{2}))?$/.exec(offset);
-  if (!match?.[1]) return "UTC";
+  if (!match?.[1] || `${match[2]}${match[3]}` === "0000") return "UTC";
   const minutes = match[3] === "00" ? "" : `:${match[3]}`;
   return `UTC${match[1] === "+" ? "+" : "\u2212"}${Number(match[2])}${minutes}`;
 }
