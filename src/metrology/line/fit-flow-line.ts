@@ -28,7 +28,8 @@ export type FlowLine = {
  * The linear range is the contiguous run of distinct pulse widths with the largest toMs/fromMs whose own least-squares
  * line rises and predicts every reading in the run within ±maxDeviationPercent; deviations are percent of what the line
  * predicts. Ties go to more points, then to the smaller residualSd. Every run is tried. The dead time is always the
- * x-intercept of that line, whatever else the word means in print; see `xIntercept` for its error and interval.
+ * x-intercept of that line, whatever else the word means in print; see `xIntercept` for its error and interval, which speak of
+ * the scatter about the line: an error of channel or timer that all points share is not in them.
  *
  * Units: ms, µL per pulse, S in µL/ms, staticFlowMlPerMin = 60 · S. Range: pulse widths above 0, minWidths from 2,
  * maxDeviationPercent above 0 and up to 100.

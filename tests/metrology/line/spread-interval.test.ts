@@ -28,7 +28,7 @@ test("of two values far apart it is the interval of their difference", () => {
   expect((high + low) / 2 - spreadPercent).toBeCloseTo(0, 2);
 });
 
-test("of four equal values it is that of the studentized range: 3.633 and 0.76 at 97.5 and 2.5 %", () => {
+test("of four equal values it is that of the range of four normal draws: 0.59 and 3.98 standard deviations (H. L. Harter 1960)", () => {
   const { low, high } = spreadInterval([1000, 1000, 1000, 1000], 1, { draws: 200_000 });
   expect(high).toBeCloseTo(0.398, 2);
   expect(low).toBeCloseTo(0.059, 2);
