@@ -154,6 +154,7 @@ export const verbs = {
   endOwnSignIn: { row: 2, writes: true },
   changeOwnPassword: { row: 2, writes: true },
   listPeople: { row: 3 },
+  getPerson: { row: 3 },
   addPerson: { row: 3, writes: true },
   setPersonActive: { row: 3, writes: true },
   setPersonRoles: { row: 3, writes: true, recent: true },

@@ -29,7 +29,7 @@ export const setPersonRolesInput = writeInput({
   version: baseVersion,
   roles: choices("Roles", staffRoles),
   customerIds: z.preprocess(
-    (typed) => (typed === undefined || typed === "" ? [] : Array.isArray(typed) ? typed : [typed]),
+    (typed) => [typed].flat().filter((each) => each !== undefined && each !== ""),
     z
       .array(id("customer"))
       .max(50, "A person acts for at most 50 customers.")
@@ -39,6 +39,8 @@ export const setPersonRolesInput = writeInput({
 export const setPersonActiveInput = writeInput({ ...person, active: tick() });
 export const renewEntryLinkInput = writeInput(person);
 export const endPersonSignInsInput = writeInput(person);
+
+export const getPersonInput = z.object(person);
 
 export const peopleShown = ["staff", "customers", "disabled"] as const;
 export const listPeopleInput = page.extend({

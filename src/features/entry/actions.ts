@@ -7,9 +7,10 @@ import { currentWriter } from "@/auth/current-actor";
 import { peerAddress } from "@/auth/peer-address";
 import { signInWithPassword } from "@/auth/sign-in";
 import { signOut } from "@/auth/sign-out";
+import { spendEntryLink } from "@/auth/spend-entry-link";
 import type { FormReply } from "@/data/edge/form-reply";
 import { formatDuration } from "@/format/format-duration";
-import { signInInput } from "./inputs";
+import { signInInput, welcomeInput } from "./inputs";
 import { sameSitePath } from "./same-site-path";
 
 type Previous = FormReply | undefined;
@@ -31,6 +32,30 @@ export async function signInAction(_previous: Previous, data: FormData): Promise
     return submission.reply({ hideFields, formErrors: ["E-mail and password do not belong together."] });
   (await cookies()).set(answer.cookie.name, answer.cookie.value, answer.cookie.attributes);
   redirect(sameSitePath(next));
+}
+
+/** The person whose set-up link it is chooses a password and is signed in. */
+export async function welcomeAction(_previous: Previous, data: FormData): Promise<FormReply> {
+  const context = await currentWriter();
+  const submission = parseWithZod(data, { schema: welcomeInput, disableAutoCoercion: true });
+  const hideFields = ["password"];
+  if (submission.status !== "success") return submission.reply({ hideFields });
+  const browser = ((await headers()).get("user-agent") ?? "").slice(0, 300);
+  const answer = await spendEntryLink(context, { ...submission.value, peer: await peerAddress(), browser });
+  if ("cookie" in answer) {
+    (await cookies()).set(answer.cookie.name, answer.cookie.value, answer.cookie.attributes);
+    redirect("/");
+  }
+  if ("problem" in answer)
+    return submission.reply({ hideFields, fieldErrors: { password: [answer.problem] } });
+  return submission.reply({
+    hideFields,
+    formErrors: [
+      "gone" in answer
+        ? "This link has been used, replaced or has run out. Ask the lab for a new one."
+        : `Too many tries. Please try again in ${formatDuration(answer.waitSeconds * 1000)}.`,
+    ],
+  });
 }
 
 export async function signOutAction(): Promise<void> {

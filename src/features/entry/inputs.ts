@@ -12,3 +12,11 @@ export const signInInput = z.object({
     .max(1000, "Password has at most 1000 characters."),
   next: z.string().max(2000).catch(""),
 });
+
+export const welcomeInput = z.object({
+  token: z.string().min(20).max(100),
+  password: z
+    .string({ error: "Password is missing." })
+    .min(1, "Password is missing.")
+    .max(4000, "Password has at most 1000 characters."),
+});
