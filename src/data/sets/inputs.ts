@@ -115,6 +115,8 @@ export const handOverSetInput = writeInput({
 });
 
 export const getSetInput = z.object({ setId: id("set") });
+export const bagLabelSizes = ["62x29", "100x50", "a4", "letter"] as const;
+export const getBagLabelsInput = getSetInput.extend({ size: z.enum(bagLabelSizes).catch("62x29") });
 export const findSetInput = z.object({ typed: searched(2000) });
 export const findKnownInjectorsInput = z.object({
   modelId: id("model"),
