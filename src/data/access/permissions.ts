@@ -168,7 +168,6 @@ export const verbs = {
   checkInSet: { row: 6, writes: true },
   listSets: { row: 7 },
   countSets: { row: 7 },
-  listToday: { row: 7 },
   findSet: { row: 7 },
   getSet: { row: 7 },
   getLabCard: { row: 7 },

@@ -54,13 +54,13 @@ function drawLabel(
   box: Box,
 ): void {
   const pad = box.height * 0.08;
-  const code = qrCode(pen, address, box.height - 2 * pad);
+  const code = qrCode(pen, address, Math.min(box.height - 2 * pad, box.width * 0.42));
   code.draw(box.x + box.width - code.height - pad, box.y + pad);
   const width = box.width - code.height - 2.5 * pad;
   const tag = fitting(pen, label.tag, width, box.height * 0.24);
   let baseline = box.y + pad + tag.size;
   pen.write(label.tag, box.x + pad, baseline, tag);
-  const small: TextStyle = { size: box.height * 0.1, weight: 400, colour: colours.ink };
+  const small: TextStyle = { size: box.height * 0.09, weight: 400, colour: colours.ink };
   for (const line of [...label.lines, lab].flatMap((text) => pen.wrap(text, width, small))) {
     baseline += leadingOf(small);
     if (baseline > box.y + box.height - pad) return;
