@@ -1,21 +1,22 @@
 import "server-only";
 import { sql } from "drizzle-orm";
-import { customers } from "../../db/schema/customers";
-import { customerPeople, entryLinks, people, personRoles, sessions } from "../../db/schema/people";
+import { entryLinks, people } from "../../db/schema/people";
 import type { StaffRole } from "../../db/vocabulary";
 
-const roles = sql<StaffRole[]>`array(select ${personRoles.role} from ${personRoles}
-  where ${personRoles.personId} = ${people.id} order by 1)`;
+// Written out, since drizzle leaves the tables' names out of a selection from one table.
+const roles = sql<
+  StaffRole[]
+>`array(select r.role from person_roles r where r.person_id = people.person_id order by 1)`;
 const actsFor = sql<{ customerId: string; name: string }[]>`coalesce((
-  select jsonb_agg(jsonb_build_object('customerId', ${customers.id}, 'name', ${customers.name})
-    order by lower(${customers.name}))
-  from ${customerPeople} join ${customers} on ${customers.id} = ${customerPeople.customerId}
-  where ${customerPeople.personId} = ${people.id}), '[]')`;
-const openSignIns = sql<number>`(select count(*)::int from ${sessions}
-  where ${sessions.userId} = ${people.id} and ${sessions.expiresAt} > now())`;
-const linkUntil = sql<Date | null>`(select ${entryLinks.expiresAt} from ${entryLinks}
-  where ${entryLinks.personId} = ${people.id} and ${entryLinks.usedAt} is null
-    and ${entryLinks.expiresAt} > record_now())`.mapWith(entryLinks.expiresAt);
+  select jsonb_agg(jsonb_build_object('customerId', c.customer_id, 'name', c.name) order by lower(c.name))
+  from customer_people p join customers c on c.customer_id = p.customer_id
+  where p.person_id = people.person_id), '[]')`;
+const openSignIns = sql<number>`(select count(*)::int from sessions s
+  where s.person_id = people.person_id and s.expires_at > now())`;
+const linkUntil = sql<Date | null>`(select l.expires_at from entry_links l
+  where l.person_id = people.person_id and l.used_at is null and l.expires_at > record_now())`.mapWith(
+  entryLinks.expiresAt,
+);
 
 /** What the manager sees of an account. */
 export const personColumns = {

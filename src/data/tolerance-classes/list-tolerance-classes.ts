@@ -1,6 +1,5 @@
 import "server-only";
 import { asc, isNull, sql } from "drizzle-orm";
-import { sets } from "../../db/schema/sets";
 import { toleranceClasses } from "../../db/schema/tolerance-classes";
 import type { Context } from "../access/actor";
 import { read } from "../read";
@@ -20,8 +19,9 @@ export function listToleranceClasses(context: Context, raw?: unknown) {
           toleranceClassId: toleranceClasses.id,
           name: toleranceClasses.name,
           retired: sql<boolean>`${toleranceClasses.retiredAt} is not null`,
-          setCount: sql<number>`(select count(*)::int from ${sets}
-            where ${sets.toleranceClassId} = ${toleranceClasses.id})`,
+          // Written out, since drizzle leaves the tables' names out of a selection from one table.
+          setCount: sql<number>`(select count(*)::int from sets s
+            where s.tolerance_class_id = tolerance_classes.tolerance_class_id)`,
         })
         .from(toleranceClasses)
         .where(input.withRetired ? undefined : isNull(toleranceClasses.retiredAt))
