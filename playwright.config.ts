@@ -10,6 +10,8 @@ export default defineConfig({
   expect: { timeout: 15_000 },
   use: {
     baseURL: process.env.APP_ORIGIN,
+    actionTimeout: 15_000,
+    navigationTimeout: 30_000,
     locale: "en-GB",
     timezoneId: "UTC",
     viewport: { width: 1440, height: 900 },

@@ -1,4 +1,4 @@
-import type { Correction, RawCycle, RawInjector } from "../../support/independent-figures";
+import type { Correction, RawInjector } from "../../support/independent-figures";
 
 /** What an injector really does. Synthetic: invented, and stated. */
 export type Truth = { staticMlPerMin: number; deadTimeMs: number; ohmsAt20C: number };
@@ -50,5 +50,3 @@ function tidy(value: number): number {
 export function asPasted(injectors: RawInjector[]): string {
   return injectors.map(({ amounts, heldOpenMl }) => [...amounts, heldOpenMl].join("\t")).join("\n");
 }
-
-export type Conditions = Pick<RawCycle, "temperatureC" | "pressureKpa">;
