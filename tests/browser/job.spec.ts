@@ -124,7 +124,7 @@ async function checkIn(counter: Page): Promise<string> {
   await counter.getByRole("combobox", { name: "Customer" }).fill("Orrin");
   await counter.getByRole("option", { name: /Orrin Engine Works/ }).click();
   await counter.getByRole("combobox", { name: "Injector model" }).fill("KX-440");
-  await counter.getByRole("option", { name: /KX-440/ }).click();
+  await counter.getByRole("option", { name: /Kestrel KX-440/ }).click();
   await counter.getByLabel("How many").fill(String(count));
   await counter.getByLabel("How many").press("Enter");
   for (const [index, serial] of serials.entries())

@@ -73,7 +73,9 @@ export function CycleSheet({ draft, photos }: { draft: CycleDraft; photos: React
             halfLimitPercent={halfLimit === null ? null : halfLimit / 2}
           />
         </div>
-        <ReadingFileDialog draft={draft} store={store} />
+        <div>
+          <ReadingFileDialog draft={draft} store={store} />
+        </div>
         <RecordPanel draft={draft} store={store} evaluation={evaluation} problems={problems} />
         <BenchCautions />
       </div>

@@ -1,5 +1,5 @@
 import type { SetDetail } from "@/data/sets";
-import { isOpenStage } from "@/db/vocabulary";
+import { isOpenStage, type Phase } from "@/db/vocabulary";
 import type { Clock } from "@/format/calendar";
 import { formatInstant } from "@/format/format-date";
 import { plural } from "@/format/plural";
@@ -13,10 +13,12 @@ type Props = {
   clock: Clock;
   /** The roles of who looks at it. */
   roles: readonly string[];
+  /** What the bench is at, where that is known. */
+  phase?: Phase;
 };
 
 /** The photos of a set, and the way to take more while it is worked on. */
-export function PhotosPanel({ set, clock, roles }: Props) {
+export function PhotosPanel({ set, clock, roles, phase }: Props) {
   const { photos, injectors } = set;
   const kinds = roles.includes("technician")
     ? (["spray", "intake"] as const)
@@ -40,7 +42,7 @@ export function PhotosPanel({ set, clock, roles }: Props) {
           ))}
         </ul>
       ) : null}
-      {uploads ? <PhotoUpload set={set} kinds={kinds} /> : null}
+      {uploads ? <PhotoUpload set={set} kinds={kinds} phase={phase} /> : null}
     </Sheet>
   );
 }

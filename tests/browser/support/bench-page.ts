@@ -3,7 +3,7 @@ import type { RawInjector } from "../../support/independent-figures";
 
 /** A cell of the readings by the place of its injector, from 0, and its column. */
 export function cell(page: Page, place: number, column: string): Locator {
-  return page.locator(`.ag-center-cols-container [row-index="${place}"] [col-id="${column}"]`);
+  return page.locator(`.ag-row:not(.ag-row-pinned)[row-index="${place}"] [col-id="${column}"]`);
 }
 
 type Conditions = { bench: string; temperatureC: string; pressureKpa: string };
@@ -11,7 +11,7 @@ type Conditions = { bench: string; temperatureC: string; pressureKpa: string };
 export async function typeConditions(page: Page, { bench, temperatureC, pressureKpa }: Conditions) {
   await page.getByLabel("Bench", { exact: true }).selectOption({ label: bench });
   await page.getByLabel("Fluid in °C").fill(temperatureC);
-  await page.getByLabel("Pressure across in kPa").fill(pressureKpa);
+  await page.getByLabel("Pressure in kPa").fill(pressureKpa);
   await page.getByLabel("Winding in °C").fill("23");
   await page.getByLabel("Leakage at in kPa").fill(pressureKpa);
   await page.getByLabel("Leakage for in s").fill("60");

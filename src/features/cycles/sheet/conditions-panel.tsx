@@ -62,7 +62,7 @@ export function ConditionsPanel({ benches, fluids, injectors, missing, anyBench 
     missing: said(draftField.condition(key)),
   });
   return (
-    <Sheet title="Conditions" note="as the instruments show them">
+    <Sheet title="Conditions" note="as the instruments show them; pressure across the injector">
       <div className="grid grid-cols-2 gap-x-3 gap-y-0.5 tablet:grid-cols-4 desk:grid-cols-8">
         <SheetSelect
           label="Bench"
@@ -82,7 +82,7 @@ export function ConditionsPanel({ benches, fluids, injectors, missing, anyBench 
           options={fluids.map((fluid) => ({ value: fluid.fluidId, label: fluid.name }))}
         />
         <SheetInput label="Fluid" unit="°C" {...condition("fluidTemperatureC")} />
-        <SheetInput label="Pressure across" unit="kPa" {...condition("pressureKpa")} />
+        <SheetInput label="Pressure" unit="kPa" {...condition("pressureKpa")} />
         <SheetInput label="Drive" unit="V" {...condition("driveVolts")} />
         <SheetSelect
           label="Driver"

@@ -28,7 +28,6 @@ export function SheetInput({ label, field, unit, hint, missing, className }: Pro
     className,
     readOnly,
     value: text,
-    optional: true,
     errors: problem ? [problem] : undefined,
     maxLength: unit ? 24 : 2000,
     onFocus: () => setTyping(true),

@@ -37,7 +37,7 @@ export default async function CyclePage({ params }: Props) {
       />
       <CycleSheet
         draft={draft}
-        photos={<PhotosPanel set={set} clock={clock} roles={rolesOf(context.actor)} />}
+        photos={<PhotosPanel set={set} clock={clock} roles={rolesOf(context.actor)} phase={phase} />}
       />
     </>
   );
