@@ -15,6 +15,8 @@ export type GridSources = {
   workedOut: Map<string, string>;
   readOnly: boolean;
   nameOf: (row: GridRow, column: GridColumn) => string;
+  /** What was typed into a cell before its editor was there; it is handed over once. */
+  takeTypedAhead: () => string | null;
   labelOf: (row: GridRow) => { main: string; beside: string };
 };
 

@@ -12,7 +12,7 @@ import type { GridSources } from "./grid-context";
 import { fieldAt, type GridRow } from "./grid-model";
 import { useGridKeys } from "./use-grid-keys";
 
-type Props = Omit<GridSources, "range"> & {
+type Props = Omit<GridSources, "range" | "takeTypedAhead"> & {
   sheet: Sheet;
   unit: "mL" | "g";
   onEdit: (edits: Edit[]) => void;
@@ -22,7 +22,7 @@ type Props = Omit<GridSources, "range"> & {
 /** Injectors by pulse widths, typed like a spreadsheet: arrows, Enter, Tab, ranges, paste, fill down, clear, undo. */
 export function ReadingGrid({ sheet, unit, onEdit, onUndo, ...given }: Props) {
   const api = useRef<GridApi<GridRow> | null>(null);
-  const sources = useRef<GridSources>({ ...given, range: null });
+  const sources = useRef<GridSources>({ ...given, range: null, takeTypedAhead: () => null });
   const [said, say] = useState("");
   const [focused, setFocused] = useState<string | null>(null);
   const edit = useRef((edits: Edit[]) => {
@@ -30,7 +30,7 @@ export function ReadingGrid({ sheet, unit, onEdit, onUndo, ...given }: Props) {
     onEdit(edits);
   });
   const keys = useGridKeys({ sources, onEdit: (edits) => edit.current(edits), onUndo, say });
-  sources.current = { ...given, range: keys.range };
+  sources.current = { ...given, range: keys.range, takeTypedAhead: keys.takeTypedAhead };
   edit.current = (edits) => {
     say("");
     onEdit(edits);

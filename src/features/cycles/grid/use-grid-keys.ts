@@ -1,9 +1,18 @@
 import type { CellPosition, GridApi, SuppressKeyboardEventParams } from "ag-grid-community";
 import { useRef, useState } from "react";
 import type { Edit } from "../draft/draft-state";
-import { type CellPlace, clearCells, copyBlock, fillDown, placeBlock, type Range, readBlock } from "./block";
+import {
+  type CellPlace,
+  clearCells,
+  copyBlock,
+  fillDown,
+  placeBlock,
+  type Range,
+  readBlock,
+  typedRows,
+} from "./block";
 import type { GridContext } from "./grid-context";
-import type { GridRow } from "./grid-model";
+import { fieldAt, type GridRow } from "./grid-model";
 import { isArrow, neighbour, nextTyped } from "./next-place";
 
 type Hands = {
@@ -19,6 +28,8 @@ export function useGridKeys({ sources, onEdit, onUndo, say }: Hands) {
   const [range, setRange] = useState<Range | null>(null);
   /** Editing began with a typed key: then arrows leave the cell instead of moving in its text. */
   const typedOver = useRef(false);
+  /** Keys that came since editing began and before the editor was there: fast hands and scanners are ahead of it. */
+  const typedAhead = useRef<string | null>(null);
 
   function placeOf(cell: CellPosition | null): CellPlace | null {
     const { model } = sources.current;
@@ -42,8 +53,13 @@ export function useGridKeys({ sources, onEdit, onUndo, say }: Hands) {
     if (!place) return false;
     const held = event.ctrlKey || event.metaKey || event.altKey;
     const next = held ? null : nextOf(event, place, editing);
+    if (editing && typedAhead.current !== null && isSign(event, held)) {
+      typedAhead.current += event.key;
+      event.preventDefault();
+      return true;
+    }
     if (next) {
-      if (editing) api.stopEditing();
+      if (editing) stopEditing(api, place);
       setRange(event.shiftKey && isArrow(event.key) ? { from: range?.from ?? place, to: next } : null);
       if (!(event.shiftKey && isArrow(event.key))) go(api, next);
     }
@@ -51,9 +67,27 @@ export function useGridKeys({ sources, onEdit, onUndo, say }: Hands) {
       event.preventDefault();
       return true;
     }
-    if (!editing) typedOver.current = event.key.length === 1 && !held;
+    if (!editing) {
+      typedOver.current = isSign(event, held);
+      typedAhead.current = typedOver.current ? event.key : null;
+    }
     if (event.key === "Escape") setRange(null);
     return false;
+  }
+
+  /** An editor that is not there yet has nothing to hand over, so what was typed ahead of it is put in its place. */
+  function stopEditing(api: Api, { row, column }: CellPlace): void {
+    const { model } = sources.current;
+    const ahead = takeTypedAhead();
+    api.stopEditing(ahead !== null);
+    const field = ahead === null ? null : fieldAt(typedRows(model)[row]!, model.columns[column]!);
+    if (field && ahead !== null) onEdit([{ field, value: ahead.trim() }]);
+  }
+
+  function takeTypedAhead(): string | null {
+    const ahead = typedAhead.current;
+    typedAhead.current = null;
+    return ahead;
   }
 
   function nextOf(event: KeyboardEvent, place: CellPlace, editing: boolean): CellPlace | null {
@@ -95,7 +129,11 @@ export function useGridKeys({ sources, onEdit, onUndo, say }: Hands) {
     setRange(start && to ? { from: start, to } : null);
   }
 
-  return { range, onKey, paste, copy, press };
+  return { range, onKey, paste, copy, press, takeTypedAhead };
+}
+
+function isSign(event: KeyboardEvent, held: boolean): boolean {
+  return event.key.length === 1 && !held;
 }
 
 function cornerOf({ from, to }: Range): CellPlace {
