@@ -1,17 +1,8 @@
 import Link from "next/link";
-import type { BenchRow, BenchState } from "@/data/benches";
+import type { BenchRow } from "@/data/benches";
 import { formatRecordDayOf } from "@/format/format-date";
-import { StatusMark } from "@/ui/feedback/status-mark";
-import type { StatusKind } from "@/ui/feedback/status-mark-kind";
 import { Sheet } from "@/ui/layout/sheet";
-
-const kinds: Record<BenchState, StatusKind> = {
-  "in calibration": "pass",
-  due: "due",
-  overdue: "fail",
-  "on hold": "held",
-  retired: "neutral",
-};
+import { BenchStateMark } from "./bench-state";
 
 /** Which benches can be worked on. */
 export function BenchesSheet({ benches, zone }: { benches: BenchRow[]; zone: string }) {
@@ -30,10 +21,10 @@ export function BenchesSheet({ benches, zone }: { benches: BenchRow[]; zone: str
                 <span>
                   <span className="font-semibold">{code}</span> <span className="text-ink-2">{location}</span>
                 </span>
-                <StatusMark kind={kinds[state]}>
-                  {state}
-                  {calibratedUntil ? ` to ${formatRecordDayOf(calibratedUntil, zone)}` : ""}
-                </StatusMark>
+                <BenchStateMark
+                  state={state}
+                  until={calibratedUntil && formatRecordDayOf(calibratedUntil, zone)}
+                />
               </Link>
             </li>
           ))}
