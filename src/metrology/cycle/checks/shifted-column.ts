@@ -12,6 +12,8 @@ export function findShiftedColumn(
   const asRead = rootMeanSquares(grid, column, predictions, 0);
   const { least, coverage, left } = thresholds.shift;
   if (!asRead || asRead.count < 4 || asRead.share < Math.max(least, coverage * asRead.u)) return null;
+  // One reading that is wrong by itself explains more simply what a shift would only push out of the column.
+  if (asRead.shareWithoutWorst <= left * asRead.share) return null;
   const found = ([1, -1] as const).flatMap((shift) => {
     const shifted = rootMeanSquares(grid, column, predictions, shift);
     if (!shifted || shifted.count < 3 || shifted.share > left * asRead.share) return [];
@@ -31,15 +33,23 @@ export function findShiftedColumn(
 
 /** Deviations of readings from the prediction of the injector they may belong to, `shift` rows before, as a share. */
 function rootMeanSquares(grid: Grid, column: Column, predictions: Map<Row, Prediction>, shift: 0 | 1 | -1) {
-  let [count, squares, variance] = [0, 0, 0];
+  let [count, squares, worst, variance] = [0, 0, 0, 0];
   grid.rows.forEach((row, index) => {
     const owner = grid.rows[index - shift];
     const prediction = owner && predictions.get(owner);
     const [read, place] = [row.cells.get(column), owner?.cells.get(column)];
     if (!prediction || !read || !place) return;
     count += 1;
-    squares += ((place.flowOf(read.amount) - prediction.flow) / prediction.flow) ** 2;
+    const square = ((place.flowOf(read.amount) - prediction.flow) / prediction.flow) ** 2;
+    squares += square;
+    worst = Math.max(worst, square);
     variance += (prediction.u / prediction.flow) ** 2;
   });
-  return count > 0 ? { count, share: Math.sqrt(squares / count), u: Math.sqrt(variance / count) } : null;
+  if (count === 0) return null;
+  return {
+    count,
+    share: Math.sqrt(squares / count),
+    shareWithoutWorst: Math.sqrt(Math.max(0, squares - worst) / Math.max(1, count - 1)),
+    u: Math.sqrt(variance / count),
+  };
 }
