@@ -42,7 +42,11 @@ export function FlowLineChart(props: Props) {
     <figure>
       <div aria-hidden="true">
         <ResponsiveContainer width="100%" height={height} initialDimension={{ width: 520, height }}>
-          <LineChart data={rows} margin={{ top: 18, right: 12, bottom: 16, left: -8 }}>
+          <LineChart
+            accessibilityLayer={false}
+            data={rows}
+            margin={{ top: 18, right: 12, bottom: 16, left: -8 }}
+          >
             <CartesianGrid {...gridStyle} />
             <XAxis
               dataKey="width"

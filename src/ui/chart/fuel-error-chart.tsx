@@ -51,6 +51,7 @@ export function FuelErrorChart(props: Props) {
       <div aria-hidden="true">
         <ResponsiveContainer width="100%" height={height} initialDimension={{ width: 520, height }}>
           <LineChart
+            accessibilityLayer={false}
             data={fuelErrorRows(widthsMs, series)}
             margin={{ top: 18, right: 34, bottom: 16, left: -8 }}
           >

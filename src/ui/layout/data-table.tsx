@@ -29,7 +29,11 @@ export function DataTable<Row>({
   if (parts.rows.length === 0 && empty) return <>{empty}</>;
   return (
     // biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls must be reachable by keyboard
-    <section aria-label={caption} tabIndex={0} className="overflow-x-auto -outline-offset-2 thin-scrollbar">
+    <section
+      aria-label={caption}
+      tabIndex={0}
+      className="relative overflow-x-auto -outline-offset-2 thin-scrollbar"
+    >
       <table className="w-full border-collapse">
         <caption
           className={captionHidden ? "sr-only" : "px-4 pt-3 pb-2 text-left text-heading font-semibold"}

@@ -39,7 +39,7 @@ function Step({ href, label }: { href?: string | null; label: string }) {
       </ButtonLink>
     );
   return (
-    <span className="inline-flex cursor-not-allowed items-center rounded-control border border-hair-2 px-2.5 py-1 text-small text-ink-2 opacity-60">
+    <span className="inline-flex cursor-not-allowed items-center rounded-control border border-hair-2 px-2.5 py-1 text-small text-ink-2">
       {label}
     </span>
   );
