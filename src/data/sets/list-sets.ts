@@ -1,6 +1,7 @@
 import "server-only";
 import { and, asc, count, desc, eq, inArray, isNull, sql } from "drizzle-orm";
 import type { Connection } from "../../db/client";
+import { certificates } from "../../db/schema/certificates";
 import { customers } from "../../db/schema/customers";
 import { setInjectors } from "../../db/schema/injectors";
 import { labDetails } from "../../db/schema/lab";
@@ -49,7 +50,7 @@ export function listSets(context: Context, raw: unknown): Promise<{ rows: SetRow
     const setIds = found.map(({ setId }) => setId);
     const [injectors, rails] = await Promise.all([
       countInjectors(connection, setIds),
-      railStripsOfSets(connection, setIds),
+      railStripsOfSets(connection, grant.customerIds ? await certifiedAmong(connection, setIds) : setIds),
     ]);
     return {
       rows: found.map((row) => ({
@@ -81,6 +82,15 @@ function selectRows(connection: Connection) {
     .innerJoin(injectorModels, eq(injectorModels.id, sets.injectorModelId))
     .innerJoin(labDetails, eq(labDetails.id, 1))
     .leftJoin(setHolds, and(eq(setHolds.setId, sets.id), isNull(setHolds.clearedAt)));
+}
+
+/** A customer sees what was measured once it is certified. */
+async function certifiedAmong(connection: Connection, setIds: string[]): Promise<string[]> {
+  const rows = await connection
+    .selectDistinct({ setId: certificates.setId })
+    .from(certificates)
+    .where(inArray(certificates.setId, setIds));
+  return rows.map(({ setId }) => setId);
 }
 
 async function countInjectors(connection: Connection, setIds: string[]): Promise<Map<string, number>> {

@@ -69,7 +69,6 @@ export default async function MySetsPage({ searchParams }: PageProps<"/my">) {
 
 function SetLine({ row, clock }: { row: SetRow; clock: Clock }) {
   const { rail, stage, hold } = row;
-  const certified = rail?.left.some((deviation) => deviation !== null);
   return (
     <Link
       href={`/my/sets/${row.setId}`}
@@ -81,7 +80,7 @@ function SetLine({ row, clock }: { row: SetRow; clock: Clock }) {
           {plural(row.injectors, "injector")}, checked in {formatDayOf(row.checkedInAt, clock)}
         </span>
       </span>
-      <span>{rail && certified ? <RailStrip size="list" {...rail} /> : null}</span>
+      <span>{rail ? <RailStrip size="list" {...rail} /> : null}</span>
       <span>
         {hold ? <StatusMark kind="held">on hold, {stage}</StatusMark> : stage}
         {isOpenStage(stage) ? (
