@@ -15,3 +15,6 @@ export function cellStyle({ align = "left", gap, wideOnly }: Placed, index: numb
     "last:pr-4",
   );
 }
+
+/** What only readers hear stands in its place and not on the page, so that it cannot widen the page. */
+export const scrollStyle = "relative overflow-x-auto -outline-offset-2 thin-scrollbar";

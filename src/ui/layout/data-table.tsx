@@ -2,6 +2,7 @@ import type { ReactNode } from "react";
 import { DataTableBody } from "./data-table-body";
 import type { DataColumn } from "./data-table-column";
 import { DataTableHead } from "./data-table-head";
+import { scrollStyle } from "./data-table-style";
 
 type Props<Row> = {
   /** What the table holds; read out, and shown unless `captionHidden`. */
@@ -29,11 +30,7 @@ export function DataTable<Row>({
   if (parts.rows.length === 0 && empty) return <>{empty}</>;
   return (
     // biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls must be reachable by keyboard
-    <section
-      aria-label={caption}
-      tabIndex={0}
-      className="relative overflow-x-auto -outline-offset-2 thin-scrollbar"
-    >
+    <section aria-label={caption} tabIndex={0} className={scrollStyle}>
       <table className="w-full border-collapse">
         <caption
           className={captionHidden ? "sr-only" : "px-4 pt-3 pb-2 text-left text-heading font-semibold"}
