@@ -16,7 +16,7 @@ export default defineConfig({
     timezoneId: "UTC",
     viewport: { width: 1440, height: 900 },
     acceptDownloads: true,
-    trace: "retain-on-failure",
+    screenshot: "only-on-failure",
     launchOptions: {
       executablePath: "/usr/bin/chromium",
       args: [

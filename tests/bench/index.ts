@@ -1,10 +1,14 @@
+import { benchCertificate } from "./certificate";
 import { benchFlowLine } from "./flow-line";
 import type { BenchTable } from "./measure";
 import { printTable } from "./print-table";
+import { benchSetPage } from "./set-page";
 
 /** `npm run bench` runs all of them, `npm run bench -- flow-line` those that are named. */
 const benches: Record<string, () => Promise<BenchTable[]>> = {
   "flow-line": benchFlowLine,
+  certificate: benchCertificate,
+  "set-page": benchSetPage,
 };
 
 const asked = process.argv.slice(2);
