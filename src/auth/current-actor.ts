@@ -1,15 +1,11 @@
 import "server-only";
 import { randomUUID } from "node:crypto";
-import { eq } from "drizzle-orm";
 import { cookies, headers } from "next/headers";
 import { cache } from "react";
-import type { Actor, Context } from "../data/access/actor";
+import type { Context } from "../data/access/actor";
 import { requireOwnOrigin } from "../data/edge/require-own-origin";
-import { database } from "../db/client";
-import { customerPeople, personRoles } from "../db/schema/people";
-import { lucia, sessionIdOf } from "./session";
-
-const recentSignInMs = 15 * 60_000;
+import { actorOf } from "./actor-of";
+import { lucia } from "./session";
 
 /** Who asks. Read anew in every request, so that a change of role or a sign-out holds at once. */
 export const currentContext = cache(async function currentContext(): Promise<Context> {
@@ -22,26 +18,4 @@ export const currentContext = cache(async function currentContext(): Promise<Con
 export async function currentWriter(): Promise<Context> {
   await requireOwnOrigin();
   return currentContext();
-}
-
-async function actorOf(token: string): Promise<Actor> {
-  const { session, user } = await lucia().validateSession(sessionIdOf(token));
-  if (!session) return { kind: "anonymous" };
-  const [roles, customers] = await Promise.all([
-    database().select({ role: personRoles.role }).from(personRoles).where(eq(personRoles.personId, user.id)),
-    database()
-      .select({ id: customerPeople.customerId })
-      .from(customerPeople)
-      .where(eq(customerPeople.personId, user.id)),
-  ]);
-  const customerIds = customers.map((customer) => customer.id);
-  return {
-    kind: "person",
-    personId: user.id,
-    name: user.name,
-    roles: [...roles.map((row) => row.role), ...(customerIds.length > 0 ? (["customer"] as const) : [])],
-    customerIds,
-    sessionId: session.id,
-    authenticatedRecently: Date.now() - (session.authenticatedAt?.getTime() ?? 0) < recentSignInMs,
-  };
 }

@@ -6,6 +6,7 @@ import { database } from "../db/client";
 import { people } from "../db/schema/people";
 import { canonicalEmail } from "./canonical-email";
 import { passwordMatches, spendTheSameTime } from "./password";
+import { recordSignIn } from "./record-sign-in";
 import { startSession } from "./session";
 import { countWrongTry, forgetWrongTries, secondsToWait } from "./throttle";
 
@@ -31,7 +32,7 @@ export async function signInWithPassword(
   }
   await forgetWrongTries(guesser);
   const cookie = await startSession(person.id, browser);
-  await recordEvent(database(), context, { event: "signed in", noun: "person", objectId: person.id });
+  await recordSignIn(context, cookie.value);
   return { cookie };
 }
 

@@ -4,6 +4,7 @@ import { recordEvent } from "../data/audit/record-event";
 import { database } from "../db/client";
 import { canonicalEmail } from "./canonical-email";
 import { findEntryLink, markEntryLinkUsed } from "./entry-link";
+import { recordSignIn } from "./record-sign-in";
 import { startSession } from "./session";
 import { checkNewPassword, storePassword } from "./set-password";
 import { countWrongTry, forgetWrongTries, secondsToWait } from "./throttle";
@@ -40,5 +41,7 @@ export async function spendEntryLink(
   });
   if (!spent) return { gone: true };
   await forgetWrongTries({ account: canonicalEmail(link.email), peer });
-  return { cookie: await startSession(personId, browser), personId };
+  const cookie = await startSession(personId, browser);
+  await recordSignIn(context, cookie.value);
+  return { cookie, personId };
 }

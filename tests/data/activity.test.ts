@@ -1,12 +1,16 @@
 import { beforeAll, expect, test } from "vitest";
 import { keyed } from "../../seed/factories/acting";
 import { dayFromNow, type Lab, makeLab } from "../../seed/factories/lab";
+import { addWorker } from "../../seed/factories/people";
 import { checkIn } from "../../seed/factories/sets";
+import { signInWithPassword } from "../../src/auth/sign-in";
 import { listActivity } from "../../src/data/activity";
+import { holdBench } from "../../src/data/benches";
 import { editLabDetails, getLabDetails } from "../../src/data/lab";
 import { listPeople } from "../../src/data/people";
 import { clearSetHold, holdSet } from "../../src/data/sets";
 import { asOwner } from "../support/databases";
+import { givePassword, nobody, password } from "../support/people";
 
 let lab: Lab;
 let setId: string;
@@ -42,6 +46,29 @@ test("person, event and set narrow the list together", async () => {
   const { rows, total } = await list({ setId, personId: lab.counter.personId, event: "set checked in" });
   expect([rows.length, total]).toEqual([1, 1]);
   expect((await list({ setId, personId: lab.technician.personId, event: "set checked in" })).total).toBe(0);
+});
+
+test("who signed in did so in their own name", async () => {
+  const { personId } = await addWorker("Bela Thorn", "bela.thorn@lab.example", ["technician"]);
+  await givePassword(personId);
+  await signInWithPassword(nobody(), {
+    email: "bela.thorn@lab.example",
+    password,
+    peer: "10.2.0.1",
+    browser: "a browser",
+  });
+  const { rows } = await list({ personId, event: "signed in" });
+  expect(rows).toMatchObject([{ personName: "Bela Thorn", roles: ["technician"], objectName: "Bela Thorn" }]);
+});
+
+test("what was changed is called by its name of today", async () => {
+  const { benchId, code } = lab.bench;
+  await holdBench(lab.technician.context, keyed({ benchId, reason: "The pump knocks." }));
+  const named = async (event: string) => (await list({ event })).rows[0]?.objectName;
+  expect(await named("bench held")).toBe(`bench ${code}`);
+  expect(await named("tolerance class added")).toMatch(/^Road race /);
+  expect(await named("model added")).toMatch(/KX-440/);
+  expect(await named("customer added")).toMatch(/^Sallow Ridge Racing /);
 });
 
 test("a refusal is on record with who tried", async () => {

@@ -4,6 +4,7 @@ import type { ReactNode } from "react";
 import { currentContext } from "@/auth/current-actor";
 import { IdentityDialog } from "@/features/entry/identity-dialog";
 import { SignOutButton } from "@/features/entry/sign-out-button";
+import { SetFinder } from "@/features/sets/set-finder";
 import { joinWords } from "@/format/join-words";
 import { AppShell } from "@/ui/layout/app-shell";
 import { navigationFor } from "./navigation";
@@ -19,6 +20,7 @@ export default async function LabLayout({ children }: { children: ReactNode }) {
       <AppShell
         navigation={navigationFor(actor.roles)}
         person={{ name: actor.name, role: joinWords(roles), href: "/profile" }}
+        finder={<SetFinder />}
         signOut={<SignOutButton />}
       >
         {children}

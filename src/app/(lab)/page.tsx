@@ -52,34 +52,44 @@ export default async function TodayPage() {
         }
       />
       <div className="grid items-start gap-3.5 laptop:grid-cols-2">
-        {roles.includes("manager") ? (
+        <div className="flex flex-col gap-3.5">
+          {roles.includes("manager") ? (
+            <SetsSheet
+              title="To review"
+              none="Nothing waits for review."
+              sets={inReview}
+              href="/sets"
+              clock={clock}
+            />
+          ) : null}
+          {roles.includes("technician") ? (
+            <SetsSheet
+              title="Just checked in"
+              none="Nothing new."
+              sets={arrived}
+              href="/bench"
+              clock={clock}
+            />
+          ) : null}
           <SetsSheet
-            title="To review"
-            none="Nothing waits for review."
-            sets={inReview}
-            href="/sets"
+            title="Ready to leave"
+            none="Nothing waits to be handed over."
+            sets={leaving}
+            href={at("ready to leave")}
             clock={clock}
           />
-        ) : null}
-        <SetsSheet title="Late" none="Nothing is late." sets={late} href={at("late")} clock={clock} />
-        {roles.includes("technician") ? (
-          <SetsSheet title="Just checked in" none="Nothing new." sets={arrived} href="/bench" clock={clock} />
-        ) : null}
-        <SetsSheet
-          title="Ready to leave"
-          none="Nothing waits to be handed over."
-          sets={leaving}
-          href={at("ready to leave")}
-          clock={clock}
-        />
-        <SetsSheet
-          title="On hold"
-          none="Nothing is on hold."
-          sets={onHold}
-          href={at("on hold")}
-          clock={clock}
-        />
-        <BenchesSheet benches={benches} zone={clock.zone} />
+        </div>
+        <div className="flex flex-col gap-3.5">
+          <SetsSheet title="Late" none="Nothing is late." sets={late} href={at("late")} clock={clock} />
+          <SetsSheet
+            title="On hold"
+            none="Nothing is on hold."
+            sets={onHold}
+            href={at("on hold")}
+            clock={clock}
+          />
+          <BenchesSheet benches={benches} zone={clock.zone} />
+        </div>
       </div>
     </>
   );

@@ -9,6 +9,7 @@ import type { Context } from "../access/actor";
 import { pageOf } from "../page-of";
 import { read } from "../read";
 import { listActivityInput } from "./inputs";
+import { objectName } from "./object-name";
 
 /** Who did what, newest first. The record holds ids; names are those of today. */
 export function listActivity(context: Context, raw: unknown) {
@@ -25,6 +26,7 @@ export function listActivity(context: Context, raw: unknown) {
         event: activity.event,
         noun: activity.noun,
         objectId: activity.objectId,
+        objectName,
         setId: activity.setId,
         setNumber: sets.number,
         before: activity.before,

@@ -1,5 +1,6 @@
 import Link from "next/link";
 import type { BenchPlace, InstrumentCalibration } from "@/data/benches";
+import { dayOf, isoDay } from "@/format/calendar";
 import { formatRecordDayOf } from "@/format/format-date";
 import { StatusMark } from "@/ui/feedback/status-mark";
 import { DataTable } from "@/ui/layout/data-table";
@@ -72,11 +73,10 @@ function standing({ inForce, ended, corrects }: Row) {
 
 function certificatesOf({ certificates }: Row) {
   if (certificates.length === 0) return "none";
-  const [first, ...others] = certificates;
   return (
     <details>
       <summary>{certificates.length}</summary>
-      {[first!, ...others].map(({ certificateId, number, state }) => (
+      {certificates.map(({ certificateId, number, state }) => (
         <Link key={certificateId} href={`/certificates/${certificateId}`} className="block">
           {number}
           {state === "current" ? "" : `, ${state}`}
@@ -87,15 +87,13 @@ function certificatesOf({ certificates }: Row) {
 }
 
 function Steps({ row, zone }: { row: Row; zone: string }) {
-  if (row.ended) return null;
+  if (row.ended && row.ended.as !== "replaced") return null;
   return (
-    <span className="flex gap-1">
-      <CorrectCalibrationDialog calibration={row} validUntil={isoDay(row.validUntil, zone)} />
+    <span className="flex justify-end gap-1">
+      {row.ended ? null : (
+        <CorrectCalibrationDialog calibration={row} validUntil={isoDay(dayOf(row.validUntil, zone))} />
+      )}
       <RevokeCalibrationDialog calibration={row} />
     </span>
   );
-}
-
-function isoDay(at: Date, zone: string): string {
-  return new Intl.DateTimeFormat("sv-SE", { timeZone: zone }).format(at);
 }

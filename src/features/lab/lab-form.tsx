@@ -100,7 +100,7 @@ function PlannedWidths({ widths, errors }: { widths: Widths; errors: Record<stri
             unit="ms"
             defaultValue={pulseWidthMs ? String(pulseWidthMs) : ""}
             errors={errors[`widths[${index}].pulseWidthMs`]}
-            className="w-36"
+            className="w-28 tablet:w-36"
           />
           <NumberInput
             name={`widths[${index}].pulseCount`}
@@ -109,7 +109,7 @@ function PlannedWidths({ widths, errors }: { widths: Widths; errors: Record<stri
             whole
             defaultValue={pulseCount ? String(pulseCount) : ""}
             errors={errors[`widths[${index}].pulseCount`]}
-            className="w-36"
+            className="w-28 tablet:w-36"
           />
           <Button
             kind="quiet"

@@ -6,6 +6,7 @@ import { ActionButton } from "@/ui/form/action-button";
 import { Facts } from "@/ui/layout/facts";
 import { Sheet } from "@/ui/layout/sheet";
 import { endOwnSignInAction } from "./actions";
+import { describeBrowser } from "./describe-browser";
 import { PasswordForm } from "./password-form";
 
 type Profile = Awaited<ReturnType<typeof getOwnProfile>>;
@@ -34,7 +35,7 @@ export function ProfileSheets({ profile, clock }: { profile: Profile; clock: Clo
             <li key={signInId} className="flex flex-wrap items-center justify-between gap-x-4 gap-y-1 py-2">
               <span className="min-w-0 flex-1 basis-64">
                 {isThisOne ? <strong className="font-semibold">This browser. </strong> : null}
-                <span className="text-small text-ink-2 wrap-break-word">{browser || "unknown browser"}</span>
+                <span className="text-small text-ink-2 wrap-break-word">{describeBrowser(browser)}</span>
                 <span className="block text-small">since {formatInstant(since, clock)}</span>
               </span>
               {isThisOne ? null : (

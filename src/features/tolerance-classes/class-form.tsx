@@ -76,9 +76,7 @@ function SpreadLimits({ limits, errors }: { limits: Limits; errors: Record<strin
   );
   return (
     <fieldset>
-      <legend className="mb-1 text-small font-medium">
-        Spread at each pulse width, from a width up to the next one's
-      </legend>
+      <legend className="mb-1 text-small font-medium">Spread allowed from each pulse width on</legend>
       {rows.map(({ key, from, spread }, index) => (
         <div key={key} className="flex items-start gap-3">
           <NumberInput
@@ -88,7 +86,7 @@ function SpreadLimits({ limits, errors }: { limits: Limits; errors: Record<strin
             unit="ms"
             defaultValue={from}
             errors={errors[`limits[${index}].fromPulseWidthMs`]}
-            className="w-36"
+            className="w-28 tablet:w-36"
           />
           <NumberInput
             name={`limits[${index}].spreadPercent`}
@@ -97,7 +95,7 @@ function SpreadLimits({ limits, errors }: { limits: Limits; errors: Record<strin
             unit="%"
             defaultValue={spread}
             errors={errors[`limits[${index}].spreadPercent`]}
-            className="w-36"
+            className="w-28 tablet:w-36"
           />
           <Button
             kind="quiet"

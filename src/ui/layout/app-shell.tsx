@@ -10,6 +10,8 @@ type Props = {
   navigation: readonly NavigationItem[];
   /** Who is signed in. */
   person: { name: string; role: string; href?: string };
+  /** Stands above the navigation, such as a field that finds what is worked on. */
+  finder?: ReactNode;
   /** The button that signs out. */
   signOut?: ReactNode;
   /** Where the mark leads. */
@@ -20,7 +22,7 @@ type Props = {
 };
 
 /** The frame of every signed-in page: navigation at the side, on a phone behind a menu button in a top bar. */
-export function AppShell({ navigation, person, signOut, homeHref = "/", wide = false, children }: Props) {
+export function AppShell({ navigation, person, finder, signOut, homeHref = "/", wide, children }: Props) {
   const foot = <SignedIn person={person} signOut={signOut} />;
   return (
     <div className="laptop:grid laptop:min-h-dvh laptop:grid-cols-[184px_minmax(0,1fr)]">
@@ -29,13 +31,14 @@ export function AppShell({ navigation, person, signOut, homeHref = "/", wide = f
         <Link href={homeHref} className="rounded-control py-1.5 no-underline">
           <Wordmark />
         </Link>
-        <NavigationDrawer items={navigation} foot={foot} />
+        <NavigationDrawer items={navigation} head={finder} foot={foot} />
       </header>
       <div className="hidden border-r border-hair laptop:block print:hidden">
         <div className="sticky top-0 flex h-dvh flex-col overflow-y-auto px-3.5 pt-5 pb-3 thin-scrollbar">
           <Link href={homeHref} className="mx-1 mb-4 self-start rounded-control px-1 py-0.5 no-underline">
             <Wordmark />
           </Link>
+          {finder}
           <nav aria-label="Main">
             <NavigationLinks items={navigation} />
           </nav>

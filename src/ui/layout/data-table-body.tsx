@@ -50,7 +50,7 @@ function BodyCell<Row>({ column, place, dense, children }: CellProps<Row>) {
   const style = classNames(
     cellStyle(column, place),
     dense ? "py-[5px] leading-[17px]" : "py-2",
-    column.wrap ? "wrap-break-word" : "whitespace-nowrap",
+    column.wrap ? "min-w-44 wrap-break-word tablet:min-w-0" : "whitespace-nowrap",
   );
   if (place > 0) return <td className={style}>{children}</td>;
   return (

@@ -6,8 +6,10 @@ import { Wordmark } from "./mark";
 import type { NavigationItem } from "./navigation";
 import { NavigationLinks } from "./navigation-links";
 
+type Props = { items: readonly NavigationItem[]; head?: ReactNode; foot: ReactNode };
+
 /** The navigation on a phone: opened from the top bar, closed by choosing, Escape or a tap beside it. */
-export function NavigationDrawer({ items, foot }: { items: readonly NavigationItem[]; foot: ReactNode }) {
+export function NavigationDrawer({ items, head, foot }: Props) {
   const [open, setOpen] = useState(false);
   const attention = items.some(({ badge }) => badge && badge.count > 0);
   return (
@@ -32,6 +34,7 @@ export function NavigationDrawer({ items, foot }: { items: readonly NavigationIt
               <span className="sr-only">Close the menu</span>
             </Dialog.Close>
           </div>
+          {head}
           <nav aria-label="Main">
             <NavigationLinks items={items} onNavigate={() => setOpen(false)} large />
           </nav>

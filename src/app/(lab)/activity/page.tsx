@@ -49,10 +49,10 @@ export default async function ActivityPage({ searchParams }: PageProps<"/activit
           rows={rows}
           rowKey={({ position }) => String(position)}
           columns={[
-            { key: "position", head: "No.", align: "right", cell: ({ position }) => position },
-            { key: "at", head: "When", cell: ({ at }) => formatRecordInstant(at, zone) },
-            { key: "who", head: "Who", cell: ({ personName, actor }) => personName ?? actor },
             { key: "event", head: "What", cell: ({ event }) => event },
+            { key: "object", head: "Of", cell: ({ objectName }) => objectName },
+            { key: "who", head: "Who", cell: ({ personName, actor }) => personName ?? actor },
+            { key: "at", head: "When", cell: ({ at }) => formatRecordInstant(at, zone) },
             {
               key: "set",
               head: "Set",
@@ -66,6 +66,7 @@ export default async function ActivityPage({ searchParams }: PageProps<"/activit
               cell: ({ before, after }) => <Changes before={before} after={after} />,
               wrap: true,
             },
+            { key: "position", head: "No.", align: "right", cell: ({ position }) => position },
           ]}
           empty={<EmptyState title="Nothing matches">Take a filter away.</EmptyState>}
         />
