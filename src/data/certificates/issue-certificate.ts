@@ -1,6 +1,6 @@
 import "server-only";
 import { createHash } from "node:crypto";
-import { version as programVersion } from "../../../package.json";
+import program from "../../../package.json" with { type: "json" };
 import type { Transaction } from "../../db/client";
 import { blobs } from "../../db/schema/blobs";
 import { certificates } from "../../db/schema/certificates";
@@ -34,7 +34,7 @@ export async function issueCertificate(
     ...results.asLeft.latest.calibrations,
   ]);
   const basis = await loadBasis(transaction, { setId: set.setId, customerId: set.customer.customerId });
-  const issue = { ...wanted, verificationCode: makeVerificationCode(), programVersion };
+  const issue = { ...wanted, verificationCode: makeVerificationCode(), programVersion: program.version };
   const content = buildContent(reviewed, basis, issue);
   const bytes = await draw(content, basis);
   const pdfSha256 = sha256(bytes);
@@ -57,7 +57,7 @@ export async function issueCertificate(
       contentSha256: fingerprintContent(content),
       pdfSha256,
       verificationCode: issue.verificationCode,
-      programVersion,
+      programVersion: program.version,
       releasedBy: issue.releaser.personId,
     })
     .returning({ certificateId: certificates.id });
