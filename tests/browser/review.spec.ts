@@ -125,4 +125,10 @@ test("a certificate is reissued and revoked, and each file says what it is befor
   await expect(manager.getByText(/\/2 is revoked/)).toBeVisible();
   await expect(manager.getByText("The wrong class was judged.", { exact: false }).first()).toBeVisible();
   expect((await manager.request.get(fileOf(second), { maxRedirects: 0 })).status()).toBe(303);
+  await expect(manager.getByRole("button", { name: "Revoke" })).toBeHidden();
+
+  await manager.getByRole("button", { name: "Reissue" }).click();
+  await manager.getByLabel("Reason for the new revision").fill("Judged by the right class.");
+  await manager.getByRole("button", { name: "Sign and reissue" }).click();
+  await expect(manager.getByRole("heading", { name: /^Certificate C\d{2}-\d{4}\/3/ })).toBeVisible();
 });

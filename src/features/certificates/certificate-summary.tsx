@@ -22,8 +22,8 @@ export function CertificateSummary({ certificate, zone }: { certificate: Certifi
           { label: "Verdict as left", value: asLeft.verdict.verdict ?? "no verdict" },
           { label: "Verification code", value: certificate.verificationCode },
           { label: "PDF", value: formatBytes(certificate.pdfBytes) },
-          { label: "SHA-256 of the PDF", value: <Hash value={certificate.pdfSha256} /> },
-          { label: "SHA-256 of the content", value: <Hash value={certificate.contentSha256} /> },
+          { label: "SHA-256, PDF", value: <Hash value={certificate.pdfSha256} /> },
+          { label: "SHA-256, content", value: <Hash value={certificate.contentSha256} /> },
         ]}
       />
     </Sheet>

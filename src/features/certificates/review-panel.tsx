@@ -1,5 +1,7 @@
 import type { PaperSize } from "@/db/vocabulary";
+import { joinWords } from "@/format/join-words";
 import { Notice } from "@/ui/feedback/notice";
+import { Facts } from "@/ui/layout/facts";
 import { Sheet } from "@/ui/layout/sheet";
 import { ReleaseDialog } from "./release-dialog";
 import { SendBackDialog } from "./send-back-dialog";
@@ -33,7 +35,15 @@ export function ReviewPanel({ set, seen, paperSize, signing, obstacle }: Props) 
             <p key={part}>{part}</p>
           ))}
         </Notice>
-      ) : null}
+      ) : (
+        <Facts
+          align="left"
+          facts={signing.recorders.map(({ name, parts }) => ({
+            label: name,
+            value: `recorded ${joinWords(parts)}`,
+          }))}
+        />
+      )}
     </Sheet>
   );
 }

@@ -19,7 +19,7 @@ type Props = {
 export function PhotoTile({ photo, words, taken, mayHide }: Props) {
   const { photoId, hiddenReason } = photo;
   return (
-    <li className="flex w-40 flex-col gap-1">
+    <li className="flex w-[calc(50%-0.375rem)] flex-col gap-1 tablet:w-40">
       {hiddenReason !== null && !mayHide ? (
         <span className="flex h-28 items-center justify-center rounded-mark border border-hair-2 text-ink-2">
           <EyeOff aria-hidden="true" size={20} />

@@ -44,7 +44,7 @@ function columnsIn(zone: string): DataColumn<Row>[] {
     { key: "used", head: "Used", cell: (row) => row.usedIn },
     {
       key: "state",
-      head: "Since",
+      head: "Today",
       cell: standing,
       wrap: true,
     },
@@ -53,7 +53,7 @@ function columnsIn(zone: string): DataColumn<Row>[] {
 
 function standing({ endedAs, endedReason }: Row) {
   if (endedAs === null) return "in force";
-  if (endedAs === "replaced") return "replaced since";
+  if (endedAs === "replaced") return "replaced in its time";
   return (
     <StatusMark kind="fail">
       {endedAs}: {endedReason}

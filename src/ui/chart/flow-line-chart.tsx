@@ -94,7 +94,7 @@ export function FlowLineChart(props: Props) {
               <ReferenceLine
                 segment={[
                   { x: deadTime, y: 0 },
-                  { x: deadTime, y: yTicks.at(-1)! * 0.3 },
+                  { x: deadTime, y: yTicks.at(-1)! * 0.8 },
                 ]}
                 stroke="var(--color-ink)"
                 label={{

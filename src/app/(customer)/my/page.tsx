@@ -12,27 +12,24 @@ import { plural } from "@/format/plural";
 import { RailStrip } from "@/ui/chart/rail-strip";
 import { StatusMark } from "@/ui/feedback/status-mark";
 import { EmptyState } from "@/ui/layout/empty-state";
+import { pagerOf, readListPage } from "@/ui/layout/list-page";
 import { PageHeader } from "@/ui/layout/page-header";
 import { Pager } from "@/ui/layout/pager";
 import { Sheet } from "@/ui/layout/sheet";
 
 export const metadata: Metadata = { title: "My sets" };
 
-const pageSize = 20;
-
 /** A customer's own sets, newest first. No grid: this page is read on phones. */
 export default async function MySetsPage({ searchParams }: PageProps<"/my">) {
-  const { page: asked } = await searchParams;
-  const page = Math.max(1, Math.min(10_000, Number(asked) || 1));
+  const page = readListPage({ page: (await searchParams).page });
   const context = await currentContext();
-  const startRow = (page - 1) * pageSize;
   const { rows, total } = await answerPage(
     listSets(context, {
       view: "all",
       sort: "checkedInAt",
       descending: "true",
-      startRow,
-      endRow: startRow + pageSize,
+      startRow: page.startRow,
+      endRow: page.endRow,
     }),
   );
   const { name, phone, clock } = await answerPage(getLabCard(context));
@@ -53,14 +50,8 @@ export default async function MySetsPage({ searchParams }: PageProps<"/my">) {
             ))}
           </ul>
         )}
-        {total > pageSize ? (
-          <Pager
-            from={startRow + 1}
-            to={startRow + rows.length}
-            total={total}
-            previousHref={page > 1 ? `/my?page=${page - 1}` : null}
-            nextHref={startRow + rows.length < total ? `/my?page=${page + 1}` : null}
-          />
+        {total > rows.length ? (
+          <Pager {...pagerOf({ path: "/my", page, shown: rows.length, total })} />
         ) : null}
       </Sheet>
     </>

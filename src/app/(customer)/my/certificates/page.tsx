@@ -1,46 +1,62 @@
 import type { Metadata } from "next";
+import Link from "next/link";
 import { currentContext } from "@/auth/current-actor";
-import { listCertificates } from "@/data/certificates";
+import { type CertificateRow, listCertificates } from "@/data/certificates";
 import { answerPage } from "@/data/edge/answer-page";
 import { getLabCard } from "@/data/lab";
 import { CertificateStateMark } from "@/features/certificates/certificate-state";
 import { formatRecordDayOf } from "@/format/format-date";
-import { DataTable } from "@/ui/layout/data-table";
 import { EmptyState } from "@/ui/layout/empty-state";
+import { pagerOf, readListPage } from "@/ui/layout/list-page";
 import { PageHeader } from "@/ui/layout/page-header";
+import { Pager } from "@/ui/layout/pager";
 import { Sheet } from "@/ui/layout/sheet";
 
 export const metadata: Metadata = { title: "My certificates" };
 
-export default async function MyCertificatesPage() {
+/** A customer's own certificates, newest first. No grid: this page is read on phones. */
+export default async function MyCertificatesPage({ searchParams }: PageProps<"/my/certificates">) {
+  const page = readListPage({ page: (await searchParams).page });
   const context = await currentContext();
-  const { rows } = await answerPage(listCertificates(context, { startRow: 0, endRow: 100 }));
+  const { rows, total } = await answerPage(listCertificates(context, page));
   const { clock } = await answerPage(getLabCard(context));
   return (
     <>
       <PageHeader title="My certificates" />
       <Sheet padding="none">
-        <DataTable
-          caption="Certificates, newest first"
-          rows={rows}
-          rowKey={({ certificateId }) => certificateId}
-          rowHref={({ certificateId }) => `/my/certificates/${certificateId}`}
-          columns={[
-            { key: "number", head: "Number", cell: ({ number }) => number },
-            { key: "state", head: "State", cell: ({ state }) => <CertificateStateMark state={state} /> },
-            { key: "set", head: "Set", cell: ({ setNumber }) => setNumber },
-            { key: "model", head: "Model", cell: ({ model }) => model },
-            {
-              key: "issued",
-              head: "Issued",
-              cell: ({ issuedAt }) => formatRecordDayOf(issuedAt, clock.zone),
-            },
-          ]}
-          empty={
-            <EmptyState title="No certificates yet">They appear when the lab releases a set.</EmptyState>
-          }
-        />
+        {rows.length === 0 ? (
+          <EmptyState title="No certificates yet">They appear when the lab releases a set.</EmptyState>
+        ) : (
+          <ul className="divide-y divide-hair-2">
+            {rows.map((row) => (
+              <li key={row.certificateId}>
+                <CertificateLine row={row} zone={clock.zone} />
+              </li>
+            ))}
+          </ul>
+        )}
+        {total > rows.length ? (
+          <Pager {...pagerOf({ path: "/my/certificates", page, shown: rows.length, total })} />
+        ) : null}
       </Sheet>
     </>
+  );
+}
+
+function CertificateLine({ row, zone }: { row: CertificateRow; zone: string }) {
+  const { certificateId, number, state, setNumber, model, issuedAt } = row;
+  return (
+    <Link
+      href={`/my/certificates/${certificateId}`}
+      className="flex flex-wrap items-baseline justify-between gap-x-6 gap-y-1 px-4 py-3.5 no-underline hover:bg-raised"
+    >
+      <span className="min-w-0">
+        <span className="font-semibold">{number}</span> issued {formatRecordDayOf(issuedAt, zone)}
+        <span className="block text-small text-ink-2">
+          set {setNumber}, {model}
+        </span>
+      </span>
+      <CertificateStateMark state={state} />
+    </Link>
   );
 }

@@ -10,18 +10,18 @@ import { obstacleFor, signingOf } from "@/features/certificates/signing-of";
 
 type Props = { context: Context; certificate: CertificateDetail };
 
-/** What the manager may do with a certificate in force. Somebody who recorded part of it does not reissue it. */
+/** What the manager may do with the newest of its series. Somebody who recorded part of it does not reissue it. */
 export async function CertificateSteps({ context, certificate }: Props) {
-  const { setId, content } = certificate;
+  const { setId, content, state, revision, revisions } = certificate;
   const set = await answerPage(getSet(context, { setId }));
   const results = await answerPage(getSetResults(context, { setId }));
   const lab = await answerPage(getLabDetails(context));
-  if (context.actor.kind !== "person") return null;
+  if (context.actor.kind !== "person" || revisions.at(-1)?.revision !== revision) return null;
   const recorded = recordersOf(results);
   const obstacle = obstacleFor(context.actor, recorded, lab.releaserIsAnother);
   return (
     <>
-      <RevokeDialog certificate={certificate} />
+      {state === "current" ? <RevokeDialog certificate={certificate} /> : null}
       {obstacle ? null : (
         <ReissueDialog
           certificate={{ ...certificate, remarks: content.remarks }}

@@ -38,7 +38,7 @@ export default async function CertificatePage({ params }: Props) {
           </>
         }
         actions={
-          state === "current" && rolesOf(context.actor).includes("manager") ? (
+          state !== "superseded" && rolesOf(context.actor).includes("manager") ? (
             <CertificateSteps context={context} certificate={certificate} />
           ) : null
         }

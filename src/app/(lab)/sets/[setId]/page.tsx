@@ -7,6 +7,7 @@ import { getSetResults } from "@/data/cycles";
 import { answerPage } from "@/data/edge/answer-page";
 import { getLabDetails } from "@/data/lab";
 import { getSet } from "@/data/sets";
+import { verdictCell } from "@/features/results/verdict-cell";
 import { SetActions } from "@/features/sets/set-actions";
 import { SetHeader } from "@/features/sets/set-header";
 import { Section } from "@/ui/layout/section";
@@ -16,7 +17,6 @@ import { SetCertificates } from "./set-certificates";
 import { SetRecord } from "./set-record";
 import { SetResultsSheets } from "./set-results-sheets";
 import { SetReview } from "./set-review";
-import { verdictCell } from "./verdict-cell";
 
 type Props = PageProps<"/sets/[setId]">;
 

@@ -13,7 +13,7 @@ export function SetCertificates({ certificates, zone }: { certificates: Certific
       <ul className="flex flex-col gap-3">
         {certificates.map((certificate) => (
           <li key={certificate.certificateId} className="flex flex-wrap items-center gap-x-4 gap-y-2">
-            <Link href={`/certificates/${certificate.certificateId}`} className="font-semibold">
+            <Link href={`/certificates/${certificate.certificateId}`} className="font-semibold underline">
               {certificate.number}
             </Link>
             <CertificateStateMark state={certificate.state} />

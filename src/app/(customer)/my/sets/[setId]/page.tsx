@@ -12,6 +12,7 @@ import { PhotosPanel } from "@/features/photos/photos-panel";
 import { CourseList } from "@/features/results/course-list";
 import { Pictures } from "@/features/results/pictures";
 import { ResultsDetail, ResultsHead } from "@/features/results/results-sheets";
+import { verdictCell } from "@/features/results/verdict-cell";
 import { InjectorsTable } from "@/features/sets/injectors-table";
 import { SetHeader } from "@/features/sets/set-header";
 import { EmptyState } from "@/ui/layout/empty-state";
@@ -35,13 +36,20 @@ export default async function MySetPage({ params }: Props) {
     certificates.length > 0 ? presentResults(set, await answerPage(getSetResults(context, { setId }))) : null;
   return (
     <>
-      <SetHeader set={set} clock={clock} back={<Link href="/my">My sets</Link>} />
+      <SetHeader
+        set={set}
+        clock={clock}
+        back={<Link href="/my">My sets</Link>}
+        moreCells={results ? verdictCell(results) : []}
+      />
       <div className="mt-3.5 flex flex-col gap-3.5">
         {certificates.map((certificate) => (
           <Sheet key={certificate.certificateId} title={`Certificate ${certificate.number}`}>
             <div className="flex flex-wrap items-center gap-x-4 gap-y-2">
               <CertificateStateMark state={certificate.state} />
-              <Link href={`/my/certificates/${certificate.certificateId}`}>What it says</Link>
+              <Link href={`/my/certificates/${certificate.certificateId}`} className="underline">
+                What it says
+              </Link>
               {certificate.state === "current" ? (
                 <CertificateFiles certificate={certificate} prominent />
               ) : null}
