@@ -10,11 +10,13 @@ const kinds: Record<BenchState, StatusKind> = {
   retired: "neutral",
 };
 
+/** How long it lasts is said of a bench that can be worked on. */
 export function BenchStateMark({ state, until }: { state: BenchState; until?: string | null }) {
+  const lasts = state === "in calibration" || state === "due";
   return (
     <StatusMark kind={kinds[state]}>
       {state}
-      {until ? ` to ${until}` : ""}
+      {lasts && until ? ` to ${until}` : ""}
     </StatusMark>
   );
 }

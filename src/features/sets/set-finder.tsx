@@ -20,7 +20,7 @@ function Finder() {
           name="typed"
           label="Find a set"
           labelHidden
-          optional
+          aria-required={false}
           type="search"
           placeholder="Number, tag, serial"
           autoComplete="off"

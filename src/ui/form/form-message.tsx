@@ -19,11 +19,18 @@ export function FormMessage({ form: { form, reply } }: Props) {
     if (refusal) place.current?.focus();
   }, [refusal]);
 
+  // A long form is sent from its foot, and what is said stands at its head.
+  useEffect(() => {
+    if (reply?.done) place.current?.scrollIntoView({ block: "nearest" });
+  }, [reply]);
+
   if (errors.length === 0 && fields.length < 2)
     return reply?.done ? (
-      <Notice live>
-        <p>{reply.done}</p>
-      </Notice>
+      <div ref={place} className="scroll-mt-16">
+        <Notice live>
+          <p>{reply.done}</p>
+        </Notice>
+      </div>
     ) : null;
 
   const [title = `${plural(fields.length, "field")} need attention.`, ...missing] = errors;
