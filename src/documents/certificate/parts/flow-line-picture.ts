@@ -85,7 +85,7 @@ function markDeadTime(pen: Pen, plot: Plot, { figures }: CertifiedPhase): void {
   if (times.length === 0) return;
   const mean = times.reduce((sum, value) => sum + value, 0) / times.length;
   const x = plot.x(mean);
-  const top = plot.top + plot.height * 0.78;
+  const top = plot.top + plot.height * 0.2;
   line(pen, [x, plot.top + plot.height], [x, top], { colour: colours.ink, width: 0.7 });
   const label = times.length > 1 ? "mean dead time" : "dead time";
   pen.write(`${label} ${formatQuantity(mean, "deadTime")}`, plot.left + 3, top - 3, styles.axis);
