@@ -122,9 +122,9 @@ test("four people take a set from the counter to the customer, and every figure 
 async function checkIn(counter: Page): Promise<string> {
   await counter.goto("/sets/new");
   await counter.getByRole("combobox", { name: "Customer" }).fill("Orrin");
-  await counter.getByRole("option", { name: /Orrin Engine Works/ }).click();
+  await counter.getByRole("option", { name: "Orrin Engine Works Orrin Hale" }).click();
   await counter.getByRole("combobox", { name: "Injector model" }).fill("KX-440");
-  await counter.getByRole("option", { name: /Kestrel KX-440/ }).click();
+  await counter.getByRole("option", { name: /^Kestrel KX-440\s*440/ }).click();
   await counter.getByLabel("How many").fill(String(count));
   await counter.getByLabel("How many").press("Enter");
   for (const [index, serial] of serials.entries())
